@@ -1,0 +1,76 @@
+//! The size of every pipe with all of its reasons.
+//!
+//! A size is the largest of several minimums. Drains look at vents and vents at stacks, so the two are repeated until nothing
+//! changes; sizes only grow, which bounds the rounds by the number of pipe sizes.
+
+mod drains;
+mod reason;
+mod terminals;
+mod vents;
+
+pub use reason::{Reason, Reasons, Rule};
+
+use crate::edition::Edition;
+use crate::loading::{Loads, StackLoads, VentLoads, WetLoads, refill};
+use crate::naming::Names;
+use crate::network::{DrainId, Network, VentId};
+use crate::quantity::{FixtureUnits, PipeSize};
+
+/// What sizes are taken from.
+#[derive(Clone, Copy)]
+pub(crate) struct Operands<'a> {
+    pub(crate) network: &'a Network,
+    pub(crate) edition: &'a Edition,
+    pub(crate) names: &'a Names,
+    pub(crate) loads: &'a Loads,
+    pub(crate) stack_loads: &'a StackLoads,
+    pub(crate) vent_loads: &'a VentLoads,
+    pub(crate) wet_loads: &'a WetLoads,
+}
+
+/// The sizes, as columns.
+#[derive(Debug, Clone, Default)]
+pub struct Sizes {
+    /// The size of each drain.
+    pub drain: Vec<PipeSize>,
+    /// Why.
+    pub drain_reasons: Reasons,
+    /// The load that each drain could still take before it must grow; none where no load table bears on it.
+    pub room: Vec<Option<FixtureUnits>>,
+    /// Drains whose load is beyond the tables of the edition or the sizes at hand.
+    pub drain_beyond: Vec<DrainId>,
+    /// The size of each vent.
+    pub vent: Vec<PipeSize>,
+    /// Why.
+    pub vent_reasons: Reasons,
+    /// Vents whose load or length is beyond the tables of the edition or the sizes at hand.
+    pub vent_beyond: Vec<VentId>,
+    /// The size of each vent where it passes to open air, by terminal.
+    pub terminal: Vec<PipeSize>,
+    /// Why.
+    pub terminal_reasons: Reasons,
+    /// The vent that gives the building drain its 3 in to open air, when a stack vent can.
+    pub large_vent: Option<VentId>,
+    /// How many rounds it took.
+    pub rounds: u32,
+}
+
+impl Sizes {
+    /// Sizes everything.
+    pub(crate) fn find(&mut self, operands: Operands<'_>) {
+        let least = operands.network.pipe_sizes.smallest().unwrap_or(PipeSize::OneAndQuarter);
+        refill(&mut self.drain, operands.network.drains.len(), least);
+        refill(&mut self.vent, operands.network.vents.len(), least);
+        self.large_vent = vents::large_vent(&operands);
+        self.rounds = 0;
+        loop {
+            self.rounds += 1;
+            let grown = self.size_drains(&operands, least) | self.size_vents(&operands, least);
+            if !grown {
+                break;
+            }
+        }
+        self.measure_room(&operands);
+        self.size_terminals(&operands, least);
+    }
+}
