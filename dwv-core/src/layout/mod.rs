@@ -30,6 +30,9 @@ pub type Id = CompactString;
 #[cfg_attr(feature = "schema", derive(schemars::JsonSchema))]
 #[serde(deny_unknown_fields)]
 pub struct Layout {
+    /// Where editors find the JSON Schema of the format; the engine does not look at it.
+    #[serde(rename = "$schema", default, skip_serializing_if = "Option::is_none")]
+    pub schema: Option<String>,
     /// Always `dwv-layout/1`.
     pub format: Format,
     /// What the drawing is called in schedules.

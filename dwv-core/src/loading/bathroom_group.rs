@@ -27,7 +27,7 @@ impl Groups {
                 continue;
             };
             let flush_valve = network.fixtures.kind[members.water_closet.index()]
-                .is_some_and(|kind| edition.fixtures.row(kind).key.contains("valve"));
+                .is_some_and(|kind| edition.fixtures.row(kind).flush_valve);
             let Some(listed) = edition.bathroom_groups.iter().find(|listed| listed.flush_valve == flush_valve) else {
                 continue;
             };

@@ -1,6 +1,6 @@
 //! The minimums of a vent.
 
-use super::drains::{operand, reason};
+use super::drains::reason;
 use super::{Operands, Reason, Rule, Sizes};
 use crate::edition::{CitationId, TableSize, VentLengthReading};
 use crate::naming::{DrainName, StackId, VentName};
@@ -149,10 +149,9 @@ fn tall_wet_vent(operands: &Operands<'_>, stack: StackId, drain: &[PipeSize]) ->
     let network = operands.network;
     let lowest = network.drains.next[end.index()].map_or(end, |next: DrainId| next);
     let storeys = u32::from(network.drains.storey[top.index()].0.abs_diff(network.drains.storey[lowest.index()].0));
-    (storeys > operands.edition.rules.wet_vent_tall.value.count).then(|| (storeys, drain[end.index()]))
+    (storeys > operands.edition.rules.wet_vent_tall.value).then(|| (storeys, drain[end.index()]))
 }
 
-/// Keeps the operand of a load reason in one place for both files.
 #[cfg(test)]
 mod tests {
     use super::*;
@@ -160,6 +159,6 @@ mod tests {
     #[test]
     fn lengths_in_reasons_are_rounded_up() {
         assert_eq!(millimetres(Length::from_nanometres(1_000_001)), 2);
-        assert_eq!(operand(FixtureUnits::from_thousandths(1500)), 1500);
+        assert_eq!(millimetres(Length::from_nanometres(-1)), 0);
     }
 }
