@@ -2,7 +2,7 @@
 
 use serde::{Deserialize, Serialize};
 
-use super::{CitationId, Cited};
+use super::Cited;
 use crate::quantity::{FixtureUnits, PipeSize};
 
 /// What sort of fixture a kind is; rules that speak of water closets or floor drains go by it.
@@ -115,13 +115,6 @@ impl FixtureTable {
         let trap = trap.unwrap_or(row.trap.value);
         let found = row.loads.iter().find(|load| load.trap.is_none_or(|listed| listed >= trap));
         found.or(row.loads.last()).map(|found| found.load)
-    }
-
-    /// Every citation of the table.
-    pub(super) fn citations(&self) -> impl Iterator<Item = CitationId> + '_ {
-        self.rows.iter().flat_map(|row| {
-            [row.outlet.citation, row.trap.citation].into_iter().chain(row.loads.iter().map(|load| load.load.citation))
-        })
     }
 }
 

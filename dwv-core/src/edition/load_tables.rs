@@ -76,8 +76,7 @@ impl BranchTable {
     /// The least size that takes a load.
     #[must_use]
     pub fn size_for(&self, load: FixtureUnits, available: PipeSizes) -> Option<TableSize> {
-        let (size, most) =
-            self.rows.iter().find(|(size, most)| available.contains(*size) && most.value >= load)?;
+        let (size, most) = self.rows.iter().find(|(size, most)| available.contains(*size) && most.value >= load)?;
         Some(TableSize { size: *size, citation: most.citation })
     }
 
@@ -128,7 +127,10 @@ mod tests {
     fn a_slope_between_two_columns_counts_as_the_flatter() {
         let edition = Edition::builtin("npc-2015").unwrap();
         let capacity = |run: u32| {
-            edition.building_drain.capacity(PipeSize::Four, Slope::one_in(run)).map(|load| load.value.thousandths() / 1000)
+            edition
+                .building_drain
+                .capacity(PipeSize::Four, Slope::one_in(run))
+                .map(|load| load.value.thousandths() / 1000)
         };
         assert_eq!(capacity(100), Some(180));
         assert_eq!(capacity(60), Some(180));

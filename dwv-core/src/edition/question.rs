@@ -155,7 +155,8 @@ impl Edition {
         let citation = citation.map(|citation| self.citation(citation));
         Ok(Answer {
             text,
-            clause: citation.map_or_else(|| self.short.clone(), |citation| format!("{} {}", self.short, citation.clause)),
+            clause: citation
+                .map_or_else(|| self.short.clone(), |citation| format!("{} {}", self.short, citation.clause)),
             witness: citation.map_or(Witness::Unsure, |citation| citation.witness),
         })
     }
@@ -185,18 +186,16 @@ impl Edition {
             }
             Question::LoadByTrap { trap } => load(self.unlisted.load(*trap)),
             Question::SemiContinuous { trap, flow } => load(self.semi_continuous.load(*trap, flow.value)),
-            Question::BathroomGroup { flush_valve } => {
-                load(self.bathroom_groups.iter().find(|group| group.flush_valve == *flush_valve).map(|group| group.load))
-            }
+            Question::BathroomGroup { flush_valve } => load(
+                self.bathroom_groups.iter().find(|group| group.flush_valve == *flush_valve).map(|group| group.load),
+            ),
             Question::StackTotal { size } => load(self.stack.capacity(*size).map(|(total, _)| total)),
             Question::StackOneStorey { size } => load(self.stack.capacity(*size).map(|(_, one)| one)),
             Question::BranchCapacity { size } => load(self.branch.capacity(*size)),
-            Question::BuildingDrainCapacity { size, slope } => {
-                match self.building_drain.capacity(*size, slope.value) {
-                    Some(capacity) => load(Some(capacity)),
-                    None => ("not permitted".to_owned(), self.building_drain.flattest(*size).map(|cell| cell.citation)),
-                }
-            }
+            Question::BuildingDrainCapacity { size, slope } => match self.building_drain.capacity(*size, slope.value) {
+                Some(capacity) => load(Some(capacity)),
+                None => ("not permitted".to_owned(), self.building_drain.flattest(*size).map(|cell| cell.citation)),
+            },
             Question::TrapArmLongest { size } => match self.trap_arm.row(*size) {
                 Some(row) => (metres(row.longest), Some(row.longest_citation)),
                 None => not_known(),
@@ -279,10 +278,13 @@ impl Edition {
 
 fn question_fault(path: &str, message: String, near: Option<&str>) -> Error {
     let fault = Fault::new(FaultCode::UnknownKind, path, message);
-    Error::one(ErrorKind::Question, match near {
-        Some(near) => fault.help(format!("did you mean `{near}`?")),
-        None => fault,
-    })
+    Error::one(
+        ErrorKind::Question,
+        match near {
+            Some(near) => fault.help(format!("did you mean `{near}`?")),
+            None => fault,
+        },
+    )
 }
 
 fn load(load: Option<Cited<FixtureUnits>>) -> (String, Option<CitationId>) {

@@ -9,9 +9,9 @@ use self::raw::{Cell, RawEdition, RawKind, RawTable, RawVentTable};
 use super::vent_by_load::LengthRow;
 use super::vent_tables::WetVentRow;
 use super::{
-    BathroomGroup, BranchTable, BuildingDrainTable, Cited, CitationId, Edition, FixtureKind, FixtureTable, Limit, LoadByTrap,
-    LoadForTrap, Readings, SemiContinuousTable, Source, StackTable, StackVentTable, TableSize, TrapArmRow, TrapArmTable,
-    VentByTrapTable, VentLengthTable, WetVentTable,
+    BathroomGroup, BranchTable, BuildingDrainTable, CitationId, Cited, Edition, FixtureKind, FixtureTable, Limit,
+    LoadByTrap, LoadForTrap, Readings, SemiContinuousTable, Source, StackTable, StackVentTable, TableSize, TrapArmRow,
+    TrapArmTable, VentByTrapTable, VentLengthTable, WetVentTable,
 };
 use crate::error::{Error, ErrorKind, Fault, FaultCode, Faults};
 use crate::quantity::{FixtureUnits, Length, LengthUnit, PipeSize};
@@ -61,12 +61,19 @@ fn build(raw: RawEdition, faults: &mut Faults) -> Option<Edition> {
         .iter()
         .map(|row| {
             let kind = if row.flush_valve { "direct flush valve" } else { "flush tank" };
-            let citation = cites.row(&raw.bathroom_group, row.witness, None, &format!("bathroom group, {kind}"), faults);
+            let citation =
+                cites.row(&raw.bathroom_group, row.witness, None, &format!("bathroom group, {kind}"), faults);
             BathroomGroup { flush_valve: row.flush_valve, load: Cited { value: row.load, citation } }
         })
         .collect();
     let unlisted = LoadByTrap {
-        rows: sized(&raw.unlisted, "fixture not listed, trap", |row| (row.trap, row.load, row.witness), &mut cites, faults),
+        rows: sized(
+            &raw.unlisted,
+            "fixture not listed, trap",
+            |row| (row.trap, row.load, row.witness),
+            &mut cites,
+            faults,
+        ),
     };
     let semi_continuous = SemiContinuousTable {
         rows: raw
@@ -96,7 +103,8 @@ fn build(raw: RawEdition, faults: &mut Faults) -> Option<Edition> {
             .collect(),
     };
     check_order("stack", stack.rows.iter().map(|(size, total, _)| (*size, total.value)), faults);
-    let branch = BranchTable { rows: sized(&raw.branch, "branch", |row| (row.size, row.load, row.witness), &mut cites, faults) };
+    let branch =
+        BranchTable { rows: sized(&raw.branch, "branch", |row| (row.size, row.load, row.witness), &mut cites, faults) };
     check_order("branch", branch.rows.iter().map(|(size, load)| (*size, load.value)), faults);
     let building_drain = building_drain(&raw.building_drain, &mut cites, faults);
     let trap_arm = TrapArmTable {
@@ -200,12 +208,7 @@ fn sized<R>(
     rows
 }
 
-fn fixtures(
-    table: &RawTable<RawKind>,
-    trap_rule: CitationId,
-    cites: &mut Cites,
-    faults: &mut Faults,
-) -> FixtureTable {
+fn fixtures(table: &RawTable<RawKind>, trap_rule: CitationId, cites: &mut Cites, faults: &mut Faults) -> FixtureTable {
     let mut rows: Vec<FixtureKind> = Vec::with_capacity(table.rows.len());
     for kind in &table.rows {
         if rows.iter().any(|row| row.key == kind.key) {
@@ -251,7 +254,8 @@ fn building_drain(table: &raw::RawBuildingDrain, cites: &mut Cites, faults: &mut
     let mut rows = Vec::with_capacity(table.rows.len());
     for row in &table.rows {
         if row.loads.len() != slopes.len() {
-            let message = format!("the row of {} in has {} loads for {} slopes", row.size, row.loads.len(), slopes.len());
+            let message =
+                format!("the row of {} in has {} loads for {} slopes", row.size, row.loads.len(), slopes.len());
             faults.push(Fault::new(FaultCode::WrongFormat, "building_drain", message));
             continue;
         }
@@ -260,7 +264,8 @@ fn building_drain(table: &raw::RawBuildingDrain, cites: &mut Cites, faults: &mut
             let subject = format!("building drain, {} in at {slope}", row.size);
             loads.push(match cell {
                 Cell::Number(load) => {
-                    let citation = cites.cell(&table.clause, row.witness, &table.sources, &subject, faults);
+                    let note = table.note.as_deref();
+                    let citation = cites.cell(&table.clause, row.witness, &table.sources, &subject, note, faults);
                     load_of(*load, &subject, faults).map(|value| Cited { value, citation })
                 }
                 Cell::Word(_) => None,
@@ -302,7 +307,8 @@ fn length_row(
     cites: &mut Cites,
     faults: &mut Faults,
 ) -> LengthRow {
-    let citation = cites.cell(&table.clause, row.witness, &table.sources, subject, faults);
+    let note = table.note.as_deref();
+    let citation = cites.cell(&table.clause, row.witness, &table.sources, subject, note, faults);
     // Blank cells to the right of the last length: the table prints no limit there.
     let mut longest: Vec<Limit<Length>> = Vec::with_capacity(table.vents.len());
     for cell in &row.longest {
@@ -326,11 +332,7 @@ fn length_row(
 }
 
 /// Sizes and loads must grow from row to row.
-fn check_order(
-    table: &str,
-    rows: impl Iterator<Item = (PipeSize, FixtureUnits)>,
-    faults: &mut Faults,
-) {
+fn check_order(table: &str, rows: impl Iterator<Item = (PipeSize, FixtureUnits)>, faults: &mut Faults) {
     let mut before: Option<(PipeSize, FixtureUnits)> = None;
     for (size, load) in rows {
         if before.is_some_and(|(smaller, less)| smaller >= size || less > load) {
@@ -364,9 +366,11 @@ mod tests {
 
     #[test]
     fn several_faults_are_reported_together() {
-        let data = DATA
-            .replacen("{ size = \"3\", load = 27,", "{ size = \"3\", load = 2,", 1)
-            .replacen("[rules.water_closet_least]", "[rules.water_closet_most]", 1);
+        let data = DATA.replacen("{ size = \"3\", load = 27,", "{ size = \"3\", load = 2,", 1).replacen(
+            "[rules.water_closet_least]",
+            "[rules.water_closet_most]",
+            1,
+        );
         assert!(Edition::from_toml(&data).unwrap_err().total() >= 3);
     }
 
@@ -377,7 +381,8 @@ mod tests {
         for citation in &edition.citations {
             citation.sources.iter().for_each(|source| used[source.index()] = true);
         }
-        let unused: Vec<_> = edition.sources.iter().zip(used).filter(|(_, used)| !used).map(|(source, _)| &source.key).collect();
+        let unused: Vec<_> =
+            edition.sources.iter().zip(used).filter(|(_, used)| !used).map(|(source, _)| &source.key).collect();
         assert!(unused.is_empty(), "{unused:?}");
     }
 }

@@ -1,6 +1,6 @@
 //! Vents by the largest trap, and wet vents.
 
-use super::{Cited, CitationId, Limit, TableSize};
+use super::{CitationId, Cited, Limit, TableSize};
 use crate::quantity::{FixtureUnits, PipeSize, PipeSizes};
 
 /// The least vent by the largest trap that it serves.
@@ -46,9 +46,7 @@ impl WetVentTable {
     pub fn size_for(&self, load: FixtureUnits, serves_water_closet: bool, available: PipeSizes) -> Option<TableSize> {
         self.rows.iter().filter(|row| available.contains(row.size)).find_map(|row| {
             match self.capacity(row.size, serves_water_closet) {
-                Limit::Most(most) if most.value >= load => {
-                    Some(TableSize { size: row.size, citation: most.citation })
-                }
+                Limit::Most(most) if most.value >= load => Some(TableSize { size: row.size, citation: most.citation }),
                 _ => None,
             }
         })
@@ -58,11 +56,8 @@ impl WetVentTable {
     #[must_use]
     pub fn capacity(&self, size: PipeSize, serves_water_closet: bool) -> Limit<Cited<FixtureUnits>> {
         let Some(row) = self.rows.iter().find(|row| row.size == size) else { return Limit::NotKnown };
-        let (limit, citation) = if serves_water_closet {
-            (row.with, row.with_citation)
-        } else {
-            (row.without, row.without_citation)
-        };
+        let (limit, citation) =
+            if serves_water_closet { (row.with, row.with_citation) } else { (row.without, row.without_citation) };
         match limit {
             Limit::Most(value) => Limit::Most(Cited { value, citation }),
             Limit::NotPermitted => Limit::NotPermitted,

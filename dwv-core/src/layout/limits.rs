@@ -34,7 +34,8 @@ pub const ELEVATION: Bound = Bound { what: "an elevation", least: metres(-10_000
 /// The height of an element above the floor of its level.
 pub const HEIGHT: Bound = Bound { what: "a height above the floor", least: metres(-300), most: metres(300) };
 /// A coordinate on the plan.
-pub const COORDINATE: Bound = Bound { what: "a coordinate on the plan", least: metres(-100_000), most: metres(100_000) };
+pub const COORDINATE: Bound =
+    Bound { what: "a coordinate on the plan", least: metres(-100_000), most: metres(100_000) };
 /// The most levels of one layout.
 pub const MOST_LEVELS: usize = 200;
 /// The most elements of one kind in one layout.

@@ -13,8 +13,8 @@ mod schema;
 
 pub use builder::LayoutBuilder;
 pub use element::{
-    Cleanout, Drain, Fixture, Format, Grounds, Joint, Level, Position, Runs, Sewer, StatedName, Terminal, Through, Valve,
-    Vent,
+    Cleanout, Drain, Fixture, Format, Grounds, Joint, Level, Position, Runs, Sewer, StatedName, Terminal, Through,
+    Valve, Vent,
 };
 
 use compact_str::CompactString;

@@ -14,6 +14,12 @@ pub struct StackLoads {
 }
 
 impl StackLoads {
+    /// What has entered the stack on the storey of a part, down to that part.
+    #[must_use]
+    pub fn on_storey(&self, drain: DrainId) -> FixtureUnits {
+        self.here[drain.index()]
+    }
+
     /// Follows every stack from its top down.
     pub fn collect(&mut self, network: &Network, names: &Names, loads: &Loads) {
         let drains = &network.drains;

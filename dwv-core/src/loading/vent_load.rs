@@ -68,9 +68,8 @@ impl VentLoads {
             if let Some(major) = names.major[at] {
                 let stack = names.vent[major.index()].stack;
                 let foot = stack.map(|stack| names.stacks[stack.0 as usize].foot);
-                let counted = foot.is_some_and(|foot| {
-                    network.drains.upstream(foot).contains(&fixtures.drain[fixture].index())
-                });
+                let counted =
+                    foot.is_some_and(|foot| network.drains.upstream(foot).contains(&fixtures.drain[fixture].index()));
                 if !counted {
                     self.extra[major.index()] = self.extra[major.index()] + load;
                 }

@@ -5,7 +5,9 @@ use super::fixture::{self, Demand};
 use super::geometry::{DrainEnds, Place, Reader, Run, vent_length};
 use super::register::{Element, Register, check_id};
 use super::vent_order::{self, VentEnds, VentOrder};
-use super::{DrainId, Drains, FixtureId, Fixtures, GroupRow, LevelRow, Network, Storey, TerminalRow, ValveRow, VentId, Vents};
+use super::{
+    DrainId, Drains, FixtureId, Fixtures, GroupRow, LevelRow, Network, Storey, TerminalRow, ValveRow, VentId, Vents,
+};
 use crate::edition::Edition;
 use crate::error::{Error, ErrorKind, Fault, FaultCode, Faults, nearest};
 use crate::layout::{Id, Layout, Position, limits};
@@ -46,7 +48,9 @@ fn check_counts(layout: &Layout, faults: &mut Faults) {
             faults.push(Fault::new(FaultCode::OutOfRange, path, format!("{count} {path}, expected at most {most}")));
         }
     }
-    for (path, count) in [("levels", layout.levels.len()), ("fixtures", layout.fixtures.len()), ("drains", layout.drains.len())] {
+    for (path, count) in
+        [("levels", layout.levels.len()), ("fixtures", layout.fixtures.len()), ("drains", layout.drains.len())]
+    {
         if count == 0 {
             faults.push(Fault::new(FaultCode::MissingKey, path, format!("the layout has no {path}")));
         }
@@ -282,9 +286,12 @@ impl<'a> Build<'a> {
                 && vents.leaving[*joint as usize].is_none()
             {
                 let drain = &layout.drains[index];
-                let message = format!("the drain `{}` begins at `{}`, where nothing drains into it", drain.id, drain.from);
+                let message =
+                    format!("the drain `{}` begins at `{}`, where nothing drains into it", drain.id, drain.from);
                 let fault = Fault::new(FaultCode::DeadEnd, format!("drains[{index}].from"), message);
-                faults.push(fault.of(&drain.id).help("connect a fixture, a cleanout or a vent there, or take the drain out"));
+                faults.push(
+                    fault.of(&drain.id).help("connect a fixture, a cleanout or a vent there, or take the drain out"),
+                );
             }
         }
         for to in vent_ends.to.iter().flatten() {
@@ -536,7 +543,10 @@ impl<'a> Build<'a> {
         let Some(stated) = &self.layout.pipe_sizes else { return self.edition.pipe_sizes };
         let sizes: PipeSizes = stated.iter().copied().collect();
         if sizes.is_empty() {
-            faults.push(Fault::new(FaultCode::OutOfRange, "pipe_sizes", "no pipe size is at hand").help("leave `pipe_sizes` out to take all sizes of the edition"));
+            faults.push(
+                Fault::new(FaultCode::OutOfRange, "pipe_sizes", "no pipe size is at hand")
+                    .help("leave `pipe_sizes` out to take all sizes of the edition"),
+            );
         } else if sizes.at_least(PipeSize::Four).is_none() {
             let message = "the sizes at hand end below 4 in, which building sewers need".to_owned();
             faults.push(Fault::new(FaultCode::OutOfRange, "pipe_sizes", message).help("add larger sizes"));

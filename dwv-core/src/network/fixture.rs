@@ -48,7 +48,8 @@ pub(super) fn demand(edition: &Edition, fixture: &Fixture, path: &str, faults: &
     if let Some(load) = fixture.load
         && load.thousandths() > limits::MOST_LOAD_THOUSANDTHS
     {
-        let message = format!("a load of `{load}` fixture units is beyond what the engine takes for one fixture, 10000");
+        let message =
+            format!("a load of `{load}` fixture units is beyond what the engine takes for one fixture, 10000");
         faults.push(Fault::new(FaultCode::OutOfRange, format!("{path}.load"), message).of(&fixture.id));
         return None;
     }

@@ -118,7 +118,14 @@ impl DrainEnds<'_> {
         Fault::new(code, format!("drains[{}].{key}", self.path), message).of(&self.drain.id)
     }
 
-    fn level(&self, length: Option<Length>, plan: Option<Length>, top: Length, foot: Length, faults: &mut Faults) -> Run {
+    fn level(
+        &self,
+        length: Option<Length>,
+        plan: Option<Length>,
+        top: Length,
+        foot: Length,
+        faults: &mut Faults,
+    ) -> Run {
         if self.drain.drop.is_some() {
             let message = "a level drain takes a slope and no drop".to_owned();
             let help = "say `\"runs\": \"sloped\"`, or state `slope`";

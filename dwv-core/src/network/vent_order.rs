@@ -43,11 +43,14 @@ pub(super) fn order(layout: &Layout, ends: &VentEnds, faults: &mut Faults) -> Ve
     let mut reached = vec![false; count];
     let mut waiting: Vec<(u32, VentEnd)> = Vec::new();
     for outlet in outlets {
-        waiting.push((outlet, match ends.to[outlet as usize] {
-            Some(Element::Valve(valve)) => VentEnd::Valve(valve),
-            Some(Element::Terminal(terminal)) => VentEnd::Terminal(terminal),
-            _ => continue,
-        }));
+        waiting.push((
+            outlet,
+            match ends.to[outlet as usize] {
+                Some(Element::Valve(valve)) => VentEnd::Valve(valve),
+                Some(Element::Terminal(terminal)) => VentEnd::Terminal(terminal),
+                _ => continue,
+            },
+        ));
     }
     while let Some((vent, air)) = waiting.pop() {
         if std::mem::replace(&mut reached[vent as usize], true) {
@@ -107,13 +110,7 @@ fn leaving(layout: &Layout, ends: &VentEnds, faults: &mut Faults) -> Vec<Option<
 }
 
 /// Says why some vents reach no air: once for each circle and once for each joint where the way ends.
-fn report_unreached(
-    layout: &Layout,
-    ends: &VentEnds,
-    leaving: &[Option<u32>],
-    reached: &[bool],
-    faults: &mut Faults,
-) {
+fn report_unreached(layout: &Layout, ends: &VentEnds, leaving: &[Option<u32>], reached: &[bool], faults: &mut Faults) {
     const UNSEEN: u32 = u32::MAX;
     let mut seen = vec![UNSEEN; reached.len()];
     let mut reported = vec![false; layout.joints.len()];

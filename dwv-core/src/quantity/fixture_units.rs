@@ -149,7 +149,10 @@ mod tests {
     #[test]
     fn prints_without_trailing_zeros() {
         let print = |text: &str| FixtureUnits::parse(text).unwrap().to_string();
-        assert_eq!((print("1.5"), print("24"), print("0.125"), print("1-1/2")), ("1.5".into(), "24".into(), "0.125".into(), "1.5".into()));
+        assert_eq!(
+            (print("1.5"), print("24"), print("0.125"), print("1-1/2")),
+            ("1.5".into(), "24".into(), "0.125".into(), "1.5".into())
+        );
         assert!(FixtureUnits::parse("-1").is_err());
         assert!(FixtureUnits::from_number(f64::NAN).is_err());
         assert!(FixtureUnits::from_number(-0.5).is_err());

@@ -142,7 +142,8 @@ impl Length {
     pub fn from_number(number: f64, unit: LengthUnit) -> Result<Self, QuantityError> {
         // Through the shortest decimal text that stands for the number, so that 1.2 is 1.2 and not 1.19999…
         let text = format!("{number}");
-        let out_of_range = || QuantityError::OutOfRange { what: WHAT, input: shown(&text), expected: "at most 1000 km" };
+        let out_of_range =
+            || QuantityError::OutOfRange { what: WHAT, input: shown(&text), expected: "at most 1000 km" };
         if !number.is_finite() || number.abs() > 1e15 {
             return Err(out_of_range());
         }

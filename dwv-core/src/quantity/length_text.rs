@@ -128,7 +128,8 @@ mod tests {
 
     #[test]
     fn writes_what_was_typed() {
-        for written in ["3'-6 1/2\"", "1.2 m", "450 mm", "9-1/2 in", "12.25 ft", "-0.3 m", "0'-3/4\"", "4.5 cm", "0 m"] {
+        for written in ["3'-6 1/2\"", "1.2 m", "450 mm", "9-1/2 in", "12.25 ft", "-0.3 m", "0'-3/4\"", "4.5 cm", "0 m"]
+        {
             assert_eq!(Length::parse(written).unwrap().to_string(), written);
         }
     }

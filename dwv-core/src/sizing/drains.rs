@@ -124,7 +124,8 @@ impl Sizes {
         if name == DrainName::BuildingSewer {
             put(Rule::SewerLeast, 0, rules.building_sewer_least.value, rules.building_sewer_least.citation);
         }
-        let as_sewer = edition.readings.building_drain_underground.value == crate::edition::UndergroundDrain::AsBuildingSewer;
+        let as_sewer =
+            edition.readings.building_drain_underground.value == crate::edition::UndergroundDrain::AsBuildingSewer;
         if name == DrainName::BuildingDrain && network.drains.underground[index] && as_sewer {
             let least = rules.building_drain_underground_least;
             put(Rule::UndergroundLeast, 0, least.value, least.citation);
@@ -139,9 +140,10 @@ impl Sizes {
     fn put_neighbours(&mut self, operands: &Operands<'_>, index: usize) {
         let network = operands.network;
         let rule = operands.edition.rules.no_smaller_than_upstream;
-        let largest = network.drains.arriving(DrainId::new(index)).max_by_key(|arriving| {
-            (self.drain[arriving.index()], std::cmp::Reverse(*arriving))
-        });
+        let largest = network
+            .drains
+            .arriving(DrainId::new(index))
+            .max_by_key(|arriving| (self.drain[arriving.index()], std::cmp::Reverse(*arriving)));
         if let Some(arriving) = largest {
             let asks = self.drain[arriving.index()];
             let other = arriving.index() as u32;

@@ -8,6 +8,7 @@ mod reason;
 mod terminals;
 mod vents;
 
+pub(crate) use drains::slope_at;
 pub use reason::{Reason, Reasons, Rule};
 
 use crate::edition::Edition;

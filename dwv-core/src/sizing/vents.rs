@@ -27,7 +27,8 @@ pub(super) fn large_vent(operands: &Operands<'_>) -> Option<VentId> {
     let mut best: Option<((bool, bool, std::cmp::Reverse<usize>), VentId)> = None;
     for (index, role) in names.vent.iter().enumerate() {
         let Some(stack) = role.stack.filter(|_| role.name == VentName::StackVent) else { continue };
-        let begins = operands.network.vents.drain[index].is_some_and(|drain| names.stack_of[drain.index()] == Some(stack));
+        let begins =
+            operands.network.vents.drain[index].is_some_and(|drain| names.stack_of[drain.index()] == Some(stack));
         let open = matches!(operands.network.vents.end[index], VentEnd::Terminal(_));
         if !begins || !open {
             continue;
@@ -73,7 +74,13 @@ impl Sizes {
         {
             let asks = sizes.at_least(answer.size).unwrap_or(answer.size);
             let operand = trap.index() as i64;
-            self.vent_reasons.push(Reason { operand, other: 0, citation: answer.citation, rule: Rule::VentByTrap, asks });
+            self.vent_reasons.push(Reason {
+                operand,
+                other: 0,
+                citation: answer.citation,
+                rule: Rule::VentByTrap,
+                asks,
+            });
         }
         let mut put = |rule: Rule, answer: Option<TableSize>| match answer {
             Some(answer) => {

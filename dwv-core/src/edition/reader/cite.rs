@@ -59,10 +59,11 @@ impl Cites {
         witness: Witness,
         sources: &[String],
         subject: &str,
+        note: Option<&str>,
         faults: &mut Faults,
     ) -> CitationId {
         let sources = if matches!(witness, Witness::Memory | Witness::Unsure) { &[] } else { sources };
-        self.add(clause, subject, witness, sources, None, faults)
+        self.add(clause, subject, witness, sources, note, faults)
     }
 
     /// The citation of a row.
@@ -74,11 +75,8 @@ impl Cites {
         subject: &str,
         faults: &mut Faults,
     ) -> CitationId {
-        let id = self.cell(&table.clause, witness, &table.sources, subject, faults);
-        if let Some(citation) = self.list.get_mut(id.index()) {
-            citation.note = note.map(str::to_owned);
-        }
-        id
+        let note = note.or(table.note.as_deref());
+        self.cell(&table.clause, witness, &table.sources, subject, note, faults)
     }
 
     pub(super) fn table(&mut self, subject: &str, note: &RawNote, faults: &mut Faults) -> CitationId {

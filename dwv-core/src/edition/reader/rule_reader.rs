@@ -115,12 +115,17 @@ pub(super) fn read(raw: BTreeMap<String, RawRule>, cites: &mut Cites, faults: &m
     let mut texts = Vec::with_capacity(raw.len());
     for (name, rule) in raw {
         let citation = cites.add(&rule.clause, &rule.says, rule.witness, &rule.sources, rule.note.as_deref(), faults);
-        texts.push(RuleText { name: name.clone(), value: rule.value.as_ref().map_or_else(String::new, words), citation });
+        texts.push(RuleText {
+            name: name.clone(),
+            value: rule.value.as_ref().map_or_else(String::new, words),
+            citation,
+        });
         rules.insert(name, (rule, citation));
     }
     let mut reader = Reader { rules, taken: Vec::new(), faults };
     let read = take_all(&mut reader, texts);
-    let unknown: Vec<String> = reader.rules.keys().filter(|name| !reader.taken.contains(&name.as_str())).cloned().collect();
+    let unknown: Vec<String> =
+        reader.rules.keys().filter(|name| !reader.taken.contains(&name.as_str())).cloned().collect();
     for name in unknown {
         let message = format!("the engine has no rule `{name}`");
         reader.faults.push(Fault::new(FaultCode::UnknownKey, format!("rules.{name}"), message));
