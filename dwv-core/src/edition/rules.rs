@@ -98,6 +98,7 @@ pub struct Rules {
     pub storey_allowance: Cited<Length>,
     pub least_slope_small: Cited<SlopeFrom>,
     pub least_slope_large: Cited<SlopeFrom>,
+    pub trap_is_outlet: Cited<()>,
     pub outlet_pipe_longest: Cited<Length>,
     pub trap_arm: Cited<ArmLimits>,
     pub trap_arm_siphonic: Cited<SiphonicArmLimits>,

@@ -42,7 +42,7 @@ impl StackVentTable {
     fn row(&self, stack: PipeSize, load: FixtureUnits) -> Option<&LengthRow> {
         let listed = self.rows.iter().map(|(size, _)| *size).find(|size| *size >= stack)?;
         let rows = || self.rows.iter().filter(|(size, _)| *size == listed).map(|(_, row)| row);
-        rows().find(|row| row.load >= load).or_else(|| rows().last())
+        rows().find(|row| row.load >= load).or_else(|| rows().next_back())
     }
 
     /// The least vent of a stack.

@@ -11,11 +11,14 @@ pub mod limits;
 #[cfg(feature = "schema")]
 mod schema;
 
-pub use builder::LayoutBuilder;
+pub use builder::{Element, LayoutBuilder, Piece, Stated};
 pub use element::{
     Cleanout, Drain, Fixture, Format, Grounds, Joint, Level, Position, Runs, Sewer, StatedName, Terminal, Through,
     Valve, Vent,
 };
+
+#[cfg(feature = "schema")]
+pub use schema::layout_schema;
 
 use compact_str::CompactString;
 use serde::{Deserialize, Serialize};

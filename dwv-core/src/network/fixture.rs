@@ -63,9 +63,7 @@ pub(super) fn demand(edition: &Edition, fixture: &Fixture, path: &str, faults: &
     };
     let listed = kind.map(|kind| edition.fixtures.row(kind));
     let (trap, trap_source) = match (fixture.trap, kind) {
-        (Some(size), _) => {
-            (Cited { value: size, citation: edition.rules.unlisted_fixture.citation }, TrapSource::Stated)
-        }
+        (Some(size), _) => (Cited { value: size, citation: edition.rules.trap_is_outlet.citation }, TrapSource::Stated),
         (None, Some(kind)) => (edition.fixtures.default_trap(kind), TrapSource::Table),
         (None, None) => {
             let message = "a custom fixture needs the size of its trap".to_owned();

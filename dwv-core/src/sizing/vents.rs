@@ -20,11 +20,11 @@ pub(super) fn large_vent(operands: &Operands<'_>) -> Option<VentId> {
     let at_end = |stack: StackId| {
         let foot = names.stacks[stack.0 as usize].foot;
         let Some(next) = operands.network.drains.next[foot.index()] else { return false };
-        let upstream = operands.network.drains.arriving(next);
+        let mut upstream = operands.network.drains.arriving(next);
         names.drain[next.index()] == DrainName::BuildingDrain
-            && upstream.fold(true, |end, at| end && names.drain[at.index()] != DrainName::BuildingDrain)
+            && upstream.all(|at| names.drain[at.index()] != DrainName::BuildingDrain)
     };
-    let mut best: Option<((bool, bool, std::cmp::Reverse<usize>), VentId)> = None;
+    let mut best = None;
     for (index, role) in names.vent.iter().enumerate() {
         let Some(stack) = role.stack.filter(|_| role.name == VentName::StackVent) else { continue };
         let begins =
@@ -34,7 +34,7 @@ pub(super) fn large_vent(operands: &Operands<'_>) -> Option<VentId> {
             continue;
         }
         let rank = (at_end(stack), names.stacks[stack.0 as usize].soil, std::cmp::Reverse(index));
-        if best.is_none_or(|(best, _)| rank > best) {
+        if best.is_none_or(|(most, _)| rank > most) {
             best = Some((rank, VentId::new(index)));
         }
     }

@@ -1,6 +1,6 @@
 //! Gathers the citations of an edition.
 
-use super::raw::{RawNote, RawReading, RawTable};
+use super::raw::{RawReading, RawTable};
 use crate::edition::{Citation, CitationId, Cited, Source, SourceId, Witness};
 use crate::error::{Fault, FaultCode, Faults, nearest};
 
@@ -77,10 +77,6 @@ impl Cites {
     ) -> CitationId {
         let note = note.or(table.note.as_deref());
         self.cell(&table.clause, witness, &table.sources, subject, note, faults)
-    }
-
-    pub(super) fn table(&mut self, subject: &str, note: &RawNote, faults: &mut Faults) -> CitationId {
-        self.add(&note.clause, subject, note.witness, &note.sources, note.note.as_deref(), faults)
     }
 
     pub(super) fn reading<T>(&mut self, name: &str, raw: RawReading<T>, faults: &mut Faults) -> Cited<T> {

@@ -16,7 +16,6 @@ pub(super) struct RawEdition {
     pub(super) pipe_sizes: Vec<PipeSize>,
     pub(super) open_questions: Vec<String>,
     pub(super) readings: RawReadings,
-    pub(super) trap_is_outlet: RawNote,
     pub(super) fixtures: RawTable<RawKind>,
     pub(super) bathroom_group: RawTable<RawGroup>,
     pub(super) unlisted: RawTable<RawTrapLoad>,
@@ -58,16 +57,6 @@ pub(super) struct RawReading<T> {
     #[serde(default)]
     pub(super) sources: Vec<String>,
     pub(super) note: String,
-}
-
-#[derive(Deserialize)]
-#[serde(deny_unknown_fields)]
-pub(super) struct RawNote {
-    pub(super) clause: String,
-    pub(super) witness: Witness,
-    #[serde(default)]
-    pub(super) sources: Vec<String>,
-    pub(super) note: Option<String>,
 }
 
 #[derive(Deserialize)]
@@ -221,19 +210,21 @@ pub(super) enum Cell {
 }
 
 #[derive(Deserialize, Clone, Copy)]
-#[serde(rename_all = "kebab-case")]
 pub(super) enum Word {
-    NotPermitted,
-    NotKnown,
-    NotLimited,
+    #[serde(rename = "not-permitted")]
+    Barred,
+    #[serde(rename = "not-known")]
+    Unknown,
+    #[serde(rename = "not-limited")]
+    Free,
 }
 
 impl Word {
     pub(super) fn limit<T>(self) -> Limit<T> {
         match self {
-            Self::NotPermitted => Limit::NotPermitted,
-            Self::NotKnown => Limit::NotKnown,
-            Self::NotLimited => Limit::NotLimited,
+            Self::Barred => Limit::NotPermitted,
+            Self::Unknown => Limit::NotKnown,
+            Self::Free => Limit::NotLimited,
         }
     }
 }

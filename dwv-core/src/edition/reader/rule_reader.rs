@@ -150,6 +150,7 @@ fn take_all(reader: &mut Reader<'_>, texts: Vec<RuleText>) -> Option<Rules> {
     let storey_allowance = reader.length("storey_allowance");
     let least_slope_small = reader.slope("least_slope_small");
     let least_slope_large = reader.slope("least_slope_large");
+    let trap_is_outlet = reader.plain("trap_is_outlet");
     let outlet_pipe_longest = reader.length("outlet_pipe_longest");
     let trap_arm = reader.value("trap_arm");
     let trap_arm_siphonic = reader.siphonic("trap_arm_siphonic");
@@ -190,6 +191,7 @@ fn take_all(reader: &mut Reader<'_>, texts: Vec<RuleText>) -> Option<Rules> {
         storey_allowance: storey_allowance?,
         least_slope_small: least_slope_small?,
         least_slope_large: least_slope_large?,
+        trap_is_outlet: trap_is_outlet?,
         outlet_pipe_longest: outlet_pipe_longest?,
         trap_arm: trap_arm?,
         trap_arm_siphonic: trap_arm_siphonic?,
