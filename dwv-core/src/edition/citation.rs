@@ -29,7 +29,7 @@ impl SourceId {
 }
 
 /// A citation of the edition, by number.
-#[derive(Debug, Clone, Copy, PartialEq, Eq, PartialOrd, Ord, Hash)]
+#[derive(Debug, Clone, Copy, PartialEq, Eq, PartialOrd, Ord, Hash, Default)]
 pub struct CitationId(pub(super) u16);
 
 impl CitationId {

@@ -58,6 +58,13 @@ impl StackTable {
         ))
     }
 
+    /// The last row whose size is at hand, for loads beyond the table.
+    #[must_use]
+    pub fn last(&self, available: PipeSizes) -> Option<(TableSize, TableSize)> {
+        let (size, all, one) = self.rows.iter().rfind(|(size, _, _)| available.contains(*size))?;
+        Some((TableSize { size: *size, citation: all.citation }, TableSize { size: *size, citation: one.citation }))
+    }
+
     /// What a stack of a size takes, in all and from one storey.
     #[must_use]
     pub fn capacity(&self, size: PipeSize) -> Option<(Cited<FixtureUnits>, Cited<FixtureUnits>)> {
@@ -77,6 +84,13 @@ impl BranchTable {
     #[must_use]
     pub fn size_for(&self, load: FixtureUnits, available: PipeSizes) -> Option<TableSize> {
         let (size, most) = self.rows.iter().find(|(size, most)| available.contains(*size) && most.value >= load)?;
+        Some(TableSize { size: *size, citation: most.citation })
+    }
+
+    /// The last row whose size is at hand, for loads beyond the table.
+    #[must_use]
+    pub fn last(&self, available: PipeSizes) -> Option<TableSize> {
+        let (size, most) = self.rows.iter().rfind(|(size, _)| available.contains(*size))?;
         Some(TableSize { size: *size, citation: most.citation })
     }
 
@@ -103,6 +117,14 @@ impl BuildingDrainTable {
     pub fn capacity(&self, size: PipeSize, slope: Slope) -> Option<Cited<FixtureUnits>> {
         let (_, loads) = self.rows.iter().find(|(listed, _)| *listed == size)?;
         self.slopes.iter().zip(loads).rev().find(|(listed, _)| **listed <= slope).and_then(|(_, load)| *load)
+    }
+
+    /// The last row whose size is at hand, for loads beyond the table.
+    #[must_use]
+    pub fn last(&self, available: PipeSizes) -> Option<TableSize> {
+        let (size, loads) = self.rows.iter().rfind(|(size, _)| available.contains(*size))?;
+        let citation = loads.iter().rev().find_map(|load| *load)?.citation;
+        Some(TableSize { size: *size, citation })
     }
 
     /// The flattest slope that a size may have.

@@ -53,8 +53,8 @@ fn build(raw: RawEdition, faults: &mut Faults) -> Option<Edition> {
         ),
         vent_length: cites.reading("vent_length", raw.readings.vent_length, faults),
     };
-    let rules = rules?;
-    let fixtures = fixtures(&raw.fixtures, rules.trap_is_outlet.citation, &mut cites, faults);
+    let trap_rule = rules.as_ref().map_or_else(CitationId::default, |rules| rules.trap_is_outlet.citation);
+    let fixtures = fixtures(&raw.fixtures, trap_rule, &mut cites, faults);
     let bathroom_groups = raw
         .bathroom_group
         .rows
@@ -186,7 +186,7 @@ fn build(raw: RawEdition, faults: &mut Faults) -> Option<Edition> {
         wet_vent,
         stack_vent,
         vent_length,
-        rules,
+        rules: rules?,
         open_questions: raw.open_questions,
     })
 }

@@ -59,6 +59,16 @@ impl StackVentTable {
         Some(TableSize { size, citation: row.citation })
     }
 
+    /// The last column whose size is at hand, for vents beyond the table.
+    #[must_use]
+    pub fn last(&self, stack: PipeSize, load: FixtureUnits, available: PipeSizes) -> Option<TableSize> {
+        let size = self.vents.iter().rfind(|size| available.contains(**size))?;
+        Some(TableSize {
+            size: *size,
+            citation: self.row(stack, load).or(self.rows.last().map(|(_, row)| row))?.citation,
+        })
+    }
+
     /// How long a vent of a size may be.
     #[must_use]
     pub fn longest(&self, stack: PipeSize, load: FixtureUnits, vent: PipeSize) -> (Limit<Length>, Option<CitationId>) {
@@ -91,6 +101,13 @@ impl VentLengthTable {
                 }
         });
         found.map(|(_, size)| TableSize { size: *size, citation: row.citation })
+    }
+
+    /// The last column whose size is at hand, for vents beyond the table.
+    #[must_use]
+    pub fn last(&self, available: PipeSizes) -> Option<TableSize> {
+        let size = self.vents.iter().rfind(|size| available.contains(**size))?;
+        Some(TableSize { size: *size, citation: self.rows.last()?.citation })
     }
 
     fn known(&self, row: usize, column: usize) -> Limit<Length> {

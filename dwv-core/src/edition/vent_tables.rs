@@ -52,6 +52,17 @@ impl WetVentTable {
         })
     }
 
+    /// The last row with a figure whose size is at hand, for loads beyond the table.
+    #[must_use]
+    pub fn last(&self, serves_water_closet: bool, available: PipeSizes) -> Option<TableSize> {
+        self.rows.iter().rev().filter(|row| available.contains(row.size)).find_map(|row| {
+            match self.capacity(row.size, serves_water_closet) {
+                Limit::Most(most) => Some(TableSize { size: row.size, citation: most.citation }),
+                _ => None,
+            }
+        })
+    }
+
     /// What a wet vent of a size takes.
     #[must_use]
     pub fn capacity(&self, size: PipeSize, serves_water_closet: bool) -> Limit<Cited<FixtureUnits>> {

@@ -59,7 +59,7 @@ impl VentLoads {
         refill(&mut self.load, vents.len(), FixtureUnits::ZERO);
         refill(&mut self.extra, vents.len(), FixtureUnits::ZERO);
         for (fixture, trap) in names.trap.iter().enumerate() {
-            let Some(vent) = trap.vent else { continue };
+            let Some(vent) = trap.counted else { continue };
             let at = vent.index();
             let size = fixtures.trap[fixture].value;
             self.trap[at] = self.trap[at].max(Some(size));

@@ -24,6 +24,8 @@ pub struct TrapAir {
     pub arm_end: DrainId,
     /// The vent that protects it in the end.
     pub vent: Option<VentId>,
+    /// The vent that is sized for it: the one that protects it or, for a trap without air, the next one downstream.
+    pub counted: Option<VentId>,
     /// The drain that brings the air to the end of the arm, when that serves as a wet vent.
     pub wet: Option<DrainId>,
 }
@@ -83,11 +85,11 @@ impl Names {
                 end = joint;
             };
             let trap = match found {
-                Air::None => TrapAir { arm_end: end, vent: None, wet: None },
-                Air::Vent(vent) => TrapAir { arm_end: end, vent: Some(vent), wet: None },
+                Air::None => TrapAir { arm_end: end, vent: None, counted: None, wet: None },
+                Air::Vent(vent) => TrapAir { arm_end: end, vent: Some(vent), counted: Some(vent), wet: None },
                 Air::Through(drain) => {
                     self.wet[drain.index()] = true;
-                    TrapAir { arm_end: end, vent: None, wet: Some(drain) }
+                    TrapAir { arm_end: end, vent: None, counted: None, wet: Some(drain) }
                 }
             };
             if found != Air::None && self.drain[end.index()] == DrainName::FixtureDrain {
@@ -132,9 +134,21 @@ impl Names {
             };
             self.vent_of_air.push(vent);
         }
+        self.find_next_vents(network);
         for trap in &mut self.trap {
             if let Some(wet) = trap.wet {
                 trap.vent = self.vent_of_air[wet.index()];
+            }
+            trap.counted = trap.vent.or(self.next_vent[trap.arm_end.index()]);
+        }
+    }
+
+    /// For each drain the first vent whose air is admitted downstream of it.
+    fn find_next_vents(&mut self, network: &Network) {
+        refill(&mut self.next_vent, network.drains.len(), None);
+        for index in (0..network.drains.len()).rev() {
+            if let Some(next) = network.drains.next[index].map(DrainId::index) {
+                self.next_vent[index] = self.vent_of_air[next].or(self.next_vent[next]);
             }
         }
     }

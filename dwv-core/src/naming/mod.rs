@@ -49,6 +49,7 @@ pub struct Names {
     distance: Vec<i64>,
     through_stack: Vec<bool>,
     vent_of_air: Vec<Option<VentId>>,
+    next_vent: Vec<Option<VentId>>,
     served: Vec<vent_names::Served>,
     connected_below: Vec<bool>,
 }

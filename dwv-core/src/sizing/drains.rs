@@ -33,12 +33,11 @@ impl Sizes {
             let beyond = !self.put_loads(operands, index);
             self.put_minimums(operands, index);
             self.put_neighbours(operands, index);
-            let mut size = self.drain_reasons.close(operands.edition, least);
+            let size = self.drain_reasons.close(operands.edition, least);
             if beyond {
                 self.drain_beyond.push(DrainId::new(index));
-                size = size.max(network.pipe_sizes.largest().unwrap_or(size));
             }
-            grown |= size != self.drain[index];
+            grown |= size > self.drain[index];
             self.drain[index] = size.max(self.drain[index]);
         }
         grown
@@ -50,38 +49,45 @@ impl Sizes {
         let load = loads.load[index];
         let sizes = network.pipe_sizes;
         let mut within = true;
-        let mut put = |rule: Rule, load: FixtureUnits, answer: Option<TableSize>| match answer {
-            Some(answer) => self.drain_reasons.push(reason(rule, load, answer)),
-            None => within = false,
+        // Beyond a table its last row stands, and the drain is marked.
+        let mut put = |rule: Rule, load: FixtureUnits, answer: Option<TableSize>, last: Option<TableSize>| {
+            within &= answer.is_some();
+            if let Some(answer) = answer.or(last) {
+                self.drain_reasons.push(reason(rule, load, answer));
+            }
         };
+        let branch = || (edition.branch.size_for(load, sizes), edition.branch.last(sizes));
+        let building_drain = || (building_drain_size(operands, index), edition.building_drain.last(sizes));
         match names.drain[index] {
             DrainName::FixtureDrain | DrainName::Branch => {
                 if !is_macerated(operands, index) {
-                    put(Rule::BranchTable, load, edition.branch.size_for(load, sizes));
+                    let (answer, last) = branch();
+                    put(Rule::BranchTable, load, answer, last);
                 }
             }
             DrainName::Stack => {
                 let one = stack_loads.one_storey[index];
-                match edition.stack.size_for(load, one, sizes) {
-                    Some((total, one_storey)) => {
-                        put(Rule::StackTotal, load, Some(total));
-                        put(Rule::StackOneStorey, one, Some(one_storey));
-                    }
-                    None => put(Rule::StackTotal, load, None),
-                }
+                let (total, one_storey) = edition.stack.size_for(load, one, sizes).unzip();
+                let (last_total, last_one) = edition.stack.last(sizes).unzip();
+                put(Rule::StackTotal, load, total, last_total);
+                put(Rule::StackOneStorey, one, one_storey, last_one);
                 if names.long_offset[index] {
-                    put(Rule::BranchTable, load, edition.branch.size_for(load, sizes));
-                    put(Rule::BuildingDrainTable, load, building_drain_size(operands, index));
+                    let (answer, last) = branch();
+                    put(Rule::BranchTable, load, answer, last);
+                    let (answer, last) = building_drain();
+                    put(Rule::BuildingDrainTable, load, answer, last);
                 }
             }
             DrainName::BuildingDrain | DrainName::BuildingSewer => {
-                put(Rule::BuildingDrainTable, load, building_drain_size(operands, index));
+                let (answer, last) = building_drain();
+                put(Rule::BuildingDrainTable, load, answer, last);
             }
         }
         if let Some(end) = names.wet_end[index].map(DrainId::index) {
             let closets = operands.wet_loads.water_closets[end] > 0;
             let wet_load = operands.wet_loads.load[end];
-            put(Rule::WetVentTable, wet_load, edition.wet_vent.size_for(wet_load, closets, sizes));
+            let answer = edition.wet_vent.size_for(wet_load, closets, sizes);
+            put(Rule::WetVentTable, wet_load, answer, edition.wet_vent.last(closets, sizes));
             if let Some(trap) = operands.wet_loads.trap[end]
                 && let Some(answer) = edition.vent_by_trap.vent_for(trap)
             {

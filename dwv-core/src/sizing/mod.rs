@@ -54,6 +54,10 @@ pub struct Sizes {
     pub large_vent: Option<VentId>,
     /// How many rounds it took.
     pub rounds: u32,
+    /// The size of each drain before vents have asked for more: stack vents are sized for a stack of that size. The table of
+    /// stack vents is not in order by stack (a 1-1/2 in stack may have a longer 1-1/4 in vent than a 1-1/4 in stack), so that a
+    /// stack which grew for the sake of its vent must not take that vent's reason away.
+    before_vents: Vec<PipeSize>,
 }
 
 impl Sizes {
@@ -63,11 +67,14 @@ impl Sizes {
         refill(&mut self.drain, operands.network.drains.len(), least);
         refill(&mut self.vent, operands.network.vents.len(), least);
         self.large_vent = vents::large_vent(&operands);
-        self.rounds = 0;
-        loop {
+        self.size_drains(&operands, least);
+        self.before_vents.clear();
+        self.before_vents.extend_from_slice(&self.drain);
+        self.rounds = 1;
+        // The vents may ask for larger drains, and those for larger vents.
+        while self.size_vents(&operands, least) {
             self.rounds += 1;
-            let grown = self.size_drains(&operands, least) | self.size_vents(&operands, least);
-            if !grown {
+            if !self.size_drains(&operands, least) {
                 break;
             }
         }

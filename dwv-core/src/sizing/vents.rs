@@ -51,12 +51,11 @@ impl Sizes {
         for index in 0..network.vents.len() {
             let beyond = !self.put_vent_tables(operands, index);
             self.put_vent_minimums(operands, index);
-            let mut size = self.vent_reasons.close(operands.edition, least);
+            let size = self.vent_reasons.close(operands.edition, least);
             if beyond {
                 self.vent_beyond.push(VentId::new(index));
-                size = size.max(network.pipe_sizes.largest().unwrap_or(size));
             }
-            grown |= size != self.vent[index];
+            grown |= size > self.vent[index];
             self.vent[index] = size.max(self.vent[index]);
         }
         grown
@@ -82,26 +81,29 @@ impl Sizes {
                 asks,
             });
         }
-        let mut put = |rule: Rule, answer: Option<TableSize>| match answer {
-            Some(answer) => {
+        // Beyond a table its last column stands, and the vent is marked.
+        let mut put = |rule: Rule, answer: Option<TableSize>, last: Option<TableSize>| {
+            within &= answer.is_some();
+            if let Some(answer) = answer.or(last) {
                 let other = millimetres(length);
                 self.vent_reasons.push(Reason { other, ..reason(rule, load, answer) });
             }
-            None => within = false,
         };
         match role.name {
             VentName::Individual | VentName::Dual | VentName::Spare => {}
             VentName::Continuous | VentName::Branch | VentName::Header => {
-                put(Rule::VentLength, edition.vent_length.size_for(load, length, sizes));
+                let table = &edition.vent_length;
+                put(Rule::VentLength, table.size_for(load, length, sizes), table.last(sizes));
                 if edition.readings.vent_length.value == VentLengthReading::LargerOfRecalledAndStandIn {
-                    put(Rule::VentLengthStandIn, stand_in(operands, load, length));
+                    put(Rule::VentLengthStandIn, stand_in(operands, load, length), table.last(sizes));
                 }
             }
             VentName::StackVent | VentName::VentStack => {
                 if let Some(stack) = role.stack {
                     let foot = names.stacks[stack.0 as usize].foot;
-                    let size = self.drain[foot.index()];
-                    put(Rule::StackVentTable, edition.stack_vent.size_for(size, load, length, sizes));
+                    let size = self.before_vents[foot.index()];
+                    let table = &edition.stack_vent;
+                    put(Rule::StackVentTable, table.size_for(size, load, length, sizes), table.last(size, load, sizes));
                 }
             }
         }
