@@ -78,7 +78,7 @@ impl Columns {
             vent_loads: &self.vent_loads,
             wet_loads: &self.wet_loads,
         };
-        self.sizes.find(operands);
+        self.sizes.find(&operands);
         self.grades.find(&operands, &self.sizes);
         self.findings.find(&operands, &self.sizes, &self.grades);
     }

@@ -162,6 +162,8 @@ pub(crate) struct Case<'a> {
     pub(crate) operands: Operands<'a>,
     pub(crate) sizes: &'a Sizes,
     pub(crate) grades: &'a Grades,
+    /// The trap arm of every fixture whose trap has air.
+    pub(crate) arms: &'a [Arm],
 }
 
 impl Case<'_> {
@@ -173,29 +175,32 @@ impl Case<'_> {
     pub(crate) fn length_unit(&self) -> LengthUnit {
         self.operands.network.length_unit
     }
+}
 
-    /// The trap arms: each protected trap with its fixture.
-    pub(crate) fn arms(&self) -> impl Iterator<Item = Arm> + '_ {
-        (0..self.operands.network.fixtures.len()).filter_map(|fixture| self.arm(FixtureId::new(fixture)))
-    }
+/// The arm of a trap or, for a trap without air, its fixture drain: measured.
+#[derive(Debug, Clone, Copy)]
+pub(crate) struct Arm {
+    pub(crate) fixture: FixtureId,
+    pub(crate) end: DrainId,
+    pub(crate) siphonic: bool,
+    /// Its developed length, as far as it is known.
+    pub(crate) length: Length,
+    pub(crate) length_missing: bool,
+    pub(crate) fall: Length,
+    /// The drop of its vertical parts.
+    pub(crate) vertical: Length,
+    pub(crate) turns: u16,
+}
 
-    /// The trap arm of a fixture; none when its trap has no air.
-    pub(crate) fn arm(&self, fixture: FixtureId) -> Option<Arm> {
-        let trap = self.operands.names.trap[fixture.index()];
-        trap.vent?;
-        Some(self.way(fixture, trap.arm_end))
-    }
-
-    /// The way from a trap to the end of a pipe downstream.
-    pub(crate) fn way(&self, fixture: FixtureId, end: DrainId) -> Arm {
-        let drains = &self.operands.network.drains;
-        let fixtures = &self.operands.network.fixtures;
+impl Arm {
+    /// Measures the way from a trap to the end of a pipe downstream.
+    pub(crate) fn measure(operands: &Operands<'_>, grades: &Grades, fixture: FixtureId, end: DrainId) -> Self {
+        let (drains, fixtures) = (&operands.network.drains, &operands.network.fixtures);
         let kind = fixtures.kind[fixture.index()];
-        let siphonic = kind.is_some_and(|kind| self.operands.edition.fixtures.row(kind).siphonic);
-        let mut arm = Arm {
+        let mut arm = Self {
             fixture,
             end,
-            siphonic,
+            siphonic: kind.is_some_and(|kind| operands.edition.fixtures.row(kind).siphonic),
             length: Length::ZERO,
             length_missing: false,
             fall: Length::ZERO,
@@ -209,7 +214,7 @@ impl Case<'_> {
                 Some(length) => arm.length = arm.length + length,
                 None => arm.length_missing = true,
             }
-            let fall = self.grades.fall[index].unwrap_or(Length::ZERO);
+            let fall = grades.fall[index].unwrap_or(Length::ZERO);
             arm.fall = arm.fall + fall;
             if drains.vertical[index] {
                 arm.vertical = arm.vertical + fall;
@@ -219,21 +224,13 @@ impl Case<'_> {
         }
         arm
     }
-}
 
-/// A trap arm, measured.
-#[derive(Debug, Clone, Copy)]
-pub(crate) struct Arm {
-    pub(crate) fixture: FixtureId,
-    pub(crate) end: DrainId,
-    pub(crate) siphonic: bool,
-    /// Its developed length, as far as it is known.
-    pub(crate) length: Length,
-    pub(crate) length_missing: bool,
-    pub(crate) fall: Length,
-    /// The drop of its vertical parts.
-    pub(crate) vertical: Length,
-    pub(crate) turns: u16,
+    /// The arm of a fixture's trap; none when no air reaches it.
+    pub(crate) fn of(operands: &Operands<'_>, grades: &Grades, fixture: FixtureId) -> Option<Self> {
+        let trap = operands.names.trap[fixture.index()];
+        trap.vent?;
+        Some(Self::measure(operands, grades, fixture, trap.arm_end))
+    }
 }
 
 /// Takes findings of one check.
@@ -257,13 +254,21 @@ impl Report<'_> {
 pub struct Findings {
     /// In the order of the checks, and within one of the drawing.
     pub list: Vec<Finding>,
+    arms: Vec<Arm>,
 }
 
 impl Findings {
+    pub(crate) fn arms(&self) -> &[Arm] {
+        &self.arms
+    }
+
     /// Runs every check.
-    pub(crate) fn find(&mut self, operands: &Operands<'_>, sizes: &Sizes, grades: &Grades) {
-        let case = Case { operands: *operands, sizes, grades };
+    pub fn find(&mut self, operands: &Operands<'_>, sizes: &Sizes, grades: &Grades) {
         self.list.clear();
+        self.arms.clear();
+        let fixtures = (0..operands.network.fixtures.len()).map(FixtureId::new);
+        self.arms.extend(fixtures.filter_map(|fixture| Arm::of(operands, grades, fixture)));
+        let case = Case { operands: *operands, sizes, grades, arms: &self.arms };
         for (index, check) in CHECKS.iter().enumerate() {
             let mut report = Report { check: index as u16, list: &mut self.list };
             (check.run)(&case, &mut report);

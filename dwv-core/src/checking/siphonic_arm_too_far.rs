@@ -17,7 +17,7 @@ const VERTICAL: i64 = 1 << 62;
 /// The vertical way is marked in the limit, which is far below that mark.
 fn run(case: &Case<'_>, report: &mut Report<'_>) {
     let limits = case.operands.edition.rules.trap_arm_siphonic.value;
-    for arm in case.arms().filter(|arm| arm.siphonic) {
+    for arm in case.arms.iter().filter(|arm| arm.siphonic) {
         let horizontal = arm.length - arm.vertical;
         if horizontal > limits.most_horizontal {
             let (found, limit) = (horizontal.nanometres(), limits.most_horizontal.nanometres());

@@ -15,7 +15,7 @@ pub(super) const CHECK: Check = Check {
 /// The nominal size stands for the inside diameter, which differs from it by a few millimetres with the material.
 fn run(case: &Case<'_>, report: &mut Report<'_>) {
     let diameters = i64::from(case.operands.edition.rules.trap_arm.value.most_fall_diameters);
-    for arm in case.arms().filter(|arm| !arm.siphonic) {
+    for arm in case.arms.iter().filter(|arm| !arm.siphonic) {
         let most = case.sizes.drain[arm.end.index()].nominal().nanometres() * diameters;
         if arm.fall.nanometres() > most {
             report.violation(Subject::Fixture(arm.fixture), arm.fall.nanometres(), most);

@@ -14,7 +14,7 @@ pub(super) const CHECK: Check = Check {
 };
 
 fn run(case: &Case<'_>, report: &mut Report<'_>) {
-    for arm in case.arms().filter(|arm| !arm.siphonic) {
+    for arm in case.arms.iter().filter(|arm| !arm.siphonic) {
         let size = case.sizes.drain[arm.end.index()];
         if case.operands.edition.trap_arm.row(size).is_none() {
             report.add(Severity::CannotDecide, Subject::Fixture(arm.fixture), size.index() as i64, 0);

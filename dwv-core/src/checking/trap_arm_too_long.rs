@@ -13,7 +13,7 @@ pub(super) const CHECK: Check = Check {
 };
 
 fn run(case: &Case<'_>, report: &mut Report<'_>) {
-    for arm in case.arms().filter(|arm| !arm.siphonic) {
+    for arm in case.arms.iter().filter(|arm| !arm.siphonic) {
         let size = case.sizes.drain[arm.end.index()];
         if let Some(row) = case.operands.edition.trap_arm.row(size)
             && arm.length > row.longest

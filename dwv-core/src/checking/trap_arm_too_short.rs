@@ -14,7 +14,7 @@ pub(super) const CHECK: Check = Check {
 
 fn run(case: &Case<'_>, report: &mut Report<'_>) {
     let sizes = i64::from(case.operands.edition.rules.trap_arm.value.least_sizes);
-    for arm in case.arms().filter(|arm| !arm.siphonic && !arm.length_missing) {
+    for arm in case.arms.iter().filter(|arm| !arm.siphonic && !arm.length_missing) {
         let least = case.sizes.drain[arm.end.index()].nominal().nanometres() * sizes;
         if arm.length.nanometres() < least {
             report.violation(Subject::Fixture(arm.fixture), arm.length.nanometres(), least);

@@ -14,7 +14,7 @@ pub(super) const CHECK: Check = Check {
 
 fn run(case: &Case<'_>, report: &mut Report<'_>) {
     let rules = &case.operands.edition.rules;
-    for arm in case.arms() {
+    for arm in case.arms {
         let most = if arm.siphonic { rules.trap_arm_siphonic.value.most_turn } else { rules.trap_arm.value.most_turn };
         if arm.turns > most {
             report.violation(Subject::Fixture(arm.fixture), i64::from(arm.turns), i64::from(most));

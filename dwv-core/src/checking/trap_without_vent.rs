@@ -1,6 +1,6 @@
 //! A trap that no vent protects (NPC 2015, 2.5.1.1.).
 
-use super::{Case, Check, Finding, Report, Severity, Subject};
+use super::{Arm, Case, Check, Finding, Report, Severity, Subject};
 use crate::edition::FixtureClass;
 use crate::network::FixtureId;
 use crate::quantity::Length;
@@ -47,7 +47,7 @@ fn exemption(case: &Case<'_>, fixture: FixtureId) -> Option<i64> {
         return Some(NO_EXEMPTION);
     }
     let rule = operands.edition.rules.floor_drain_unvented.value;
-    let way = case.way(fixture, operands.names.trap[fixture.index()].arm_end);
+    let way = Arm::measure(operands, case.grades, fixture, operands.names.trap[fixture.index()].arm_end);
     if fixtures.trap[fixture.index()].value < rule.least_trap {
         return Some(TRAP_TOO_SMALL);
     }

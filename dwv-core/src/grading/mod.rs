@@ -20,7 +20,7 @@ pub struct Grades {
 
 impl Grades {
     /// Grades everything: at the slope that is drawn, else at the least that the edition allows. At a joint all inverts are one.
-    pub(crate) fn find(&mut self, operands: &Operands<'_>, sizes: &Sizes) {
+    pub fn find(&mut self, operands: &Operands<'_>, sizes: &Sizes) {
         let Network { drains, sewer_invert, .. } = operands.network;
         let count = drains.len();
         refill(&mut self.slope, count, None);

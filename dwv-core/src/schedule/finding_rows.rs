@@ -39,7 +39,8 @@ impl Sizing {
             vent_loads: &columns.vent_loads,
             wet_loads: &columns.wet_loads,
         };
-        look(&Case { operands, sizes: &columns.sizes, grades: &columns.grades })
+        let arms = columns.findings.arms();
+        look(&Case { operands, sizes: &columns.sizes, grades: &columns.grades, arms })
     }
 
     /// All findings, in the order of the checks.

@@ -4,7 +4,7 @@ use serde::Serialize;
 
 use super::pipe_rows::metres;
 use crate::Sizing;
-use crate::checking::is_exempt_from_vent;
+use crate::checking::{Arm, is_exempt_from_vent};
 use crate::network::{FixtureId, LoadSource, VentEnd};
 use crate::quantity::{FixtureUnits, Length, PipeSize};
 
@@ -50,7 +50,7 @@ impl Sizing {
         let network = &self.network;
         let fixtures = &network.fixtures;
         let index = fixture.index();
-        let arm = self.case(|case| case.arm(fixture));
+        let arm = self.case(|case| Arm::of(&case.operands, case.grades, fixture));
         let load = fixtures.load[index];
         let load_clause = match fixtures.load_source[index] {
             LoadSource::Stated => "as stated in the drawing".to_owned(),

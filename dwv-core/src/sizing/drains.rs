@@ -163,6 +163,21 @@ impl Sizes {
         }
     }
 
+    /// Whether no vent is larger than the drain that it is connected to; if so, their reasons are brought up to date.
+    pub(super) fn vents_fit_drains(&mut self, operands: &Operands<'_>) -> bool {
+        let vents = || operands.network.vents.drain.iter().enumerate();
+        let fits = vents().all(|(vent, drain)| drain.is_none_or(|drain| self.vent[vent] <= self.drain[drain.index()]));
+        if fits {
+            for (vent, drain) in vents() {
+                if let Some(drain) = drain {
+                    let asks = self.vent[vent];
+                    self.drain_reasons.change(operands.edition, drain.index(), Rule::ConnectedVent, asks);
+                }
+            }
+        }
+        fits
+    }
+
     /// The load that each drain could still take, by every table that bears on it.
     pub(super) fn measure_room(&mut self, operands: &Operands<'_>) {
         refill(&mut self.room, self.drain.len(), None);

@@ -17,16 +17,23 @@ use crate::naming::Names;
 use crate::network::{DrainId, Network, VentId};
 use crate::quantity::{FixtureUnits, PipeSize};
 
-/// What sizes are taken from.
-#[derive(Clone, Copy)]
-pub(crate) struct Operands<'a> {
-    pub(crate) network: &'a Network,
-    pub(crate) edition: &'a Edition,
-    pub(crate) names: &'a Names,
-    pub(crate) loads: &'a Loads,
-    pub(crate) stack_loads: &'a StackLoads,
-    pub(crate) vent_loads: &'a VentLoads,
-    pub(crate) wet_loads: &'a WetLoads,
+/// What sizes are taken from: the columns of the earlier passes.
+#[derive(Debug, Clone, Copy)]
+pub struct Operands<'a> {
+    /// The drawing.
+    pub network: &'a Network,
+    /// The edition in force.
+    pub edition: &'a Edition,
+    /// What each pipe is called.
+    pub names: &'a Names,
+    /// What drains through each drain.
+    pub loads: &'a Loads,
+    /// What enters each stack on one storey.
+    pub stack_loads: &'a StackLoads,
+    /// What each vent serves.
+    pub vent_loads: &'a VentLoads,
+    /// What each wet vent serves.
+    pub wet_loads: &'a WetLoads,
 }
 
 /// The sizes, as columns.
@@ -62,23 +69,23 @@ pub struct Sizes {
 
 impl Sizes {
     /// Sizes everything.
-    pub(crate) fn find(&mut self, operands: Operands<'_>) {
+    pub fn find(&mut self, operands: &Operands<'_>) {
         let least = operands.network.pipe_sizes.smallest().unwrap_or(PipeSize::OneAndQuarter);
         refill(&mut self.drain, operands.network.drains.len(), least);
         refill(&mut self.vent, operands.network.vents.len(), least);
-        self.large_vent = vents::large_vent(&operands);
-        self.size_drains(&operands, least);
+        self.large_vent = vents::large_vent(operands);
+        self.size_drains(operands, least);
         self.before_vents.clear();
         self.before_vents.extend_from_slice(&self.drain);
         self.rounds = 1;
         // The vents may ask for larger drains, and those for larger vents.
-        while self.size_vents(&operands, least) {
+        while self.size_vents(operands, least) {
             self.rounds += 1;
-            if !self.size_drains(&operands, least) {
+            if self.vents_fit_drains(operands) || !self.size_drains(operands, least) {
                 break;
             }
         }
-        self.measure_room(&operands);
-        self.size_terminals(&operands, least);
+        self.measure_room(operands);
+        self.size_terminals(operands, least);
     }
 }

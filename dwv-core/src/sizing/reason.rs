@@ -95,17 +95,19 @@ impl Reasons {
     /// Ends the reasons of one pipe and returns the size that they ask for.
     pub(super) fn close(&mut self, edition: &Edition, least: PipeSize) -> PipeSize {
         let start = self.start.last().copied().unwrap_or(0) as usize;
-        let mut governing = start;
-        for at in start + 1..self.list.len() {
-            let (best, next) = (self.list[governing], self.list[at]);
-            let better = || witness(edition, next.citation) < witness(edition, best.citation);
-            if next.asks > best.asks || (next.asks == best.asks && better()) {
-                governing = at;
-            }
-        }
+        let governing = govern(edition, &self.list, start..self.list.len());
         self.governing.push(governing as u32);
         self.start.push(self.list.len() as u32);
         self.list.get(governing).map_or(least, |reason| reason.asks.max(least))
+    }
+
+    /// Changes what one rule asks of a closed pipe, and finds again what governs.
+    pub(super) fn change(&mut self, edition: &Edition, index: usize, rule: Rule, asks: PipeSize) {
+        let range = self.start[index] as usize..self.start[index + 1] as usize;
+        for reason in self.list[range.clone()].iter_mut().filter(|reason| reason.rule == rule) {
+            reason.asks = asks;
+        }
+        self.governing[index] = govern(edition, &self.list, range) as u32;
     }
 
     /// All reasons of one pipe.
@@ -120,6 +122,19 @@ impl Reasons {
         let governing = self.governing[index] as usize;
         (governing < self.start[index + 1] as usize).then(|| &self.list[governing])
     }
+}
+
+/// The largest reason of a range, and of equal ones the best attested.
+fn govern(edition: &Edition, list: &[Reason], range: std::ops::Range<usize>) -> usize {
+    let mut governing = range.start;
+    for at in range.skip(1) {
+        let (best, next) = (list[governing], list[at]);
+        let better = || witness(edition, next.citation) < witness(edition, best.citation);
+        if next.asks > best.asks || (next.asks == best.asks && better()) {
+            governing = at;
+        }
+    }
+    governing
 }
 
 fn witness(edition: &Edition, citation: CitationId) -> crate::edition::Witness {
