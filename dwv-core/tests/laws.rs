@@ -1,4 +1,5 @@
 //! Laws that must hold for every drawing.
+#![allow(clippy::unwrap_used, clippy::expect_used)] // What cannot be drawn or sized must fail the test.
 
 #[path = "laws/drawings.rs"]
 mod drawings;

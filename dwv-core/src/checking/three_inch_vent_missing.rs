@@ -7,7 +7,7 @@ pub(super) const CHECK: Check = Check {
     name: "three-inch-vent-missing",
     finds: "a building drain that has no vent of 3 in to open air",
     matters: "the sewer has no way to breathe but through traps",
-    remedy: "carry a stack vent of 3 in through the roof",
+    remedy: "carry one vent of 3 in to open air, such as that of a stack or a water closet",
     citation: |edition| edition.rules.one_large_vent.citation,
     run,
     words,

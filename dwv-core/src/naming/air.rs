@@ -3,8 +3,10 @@
 //! NPC 2015, 2.5.1.1. (every trap is protected by a vent) and 2.5.2.1. (a drain may serve as a wet vent).
 
 use super::{DrainName, Names};
+use crate::edition::{Edition, FixtureClass};
 use crate::loading::{Loads, refill};
 use crate::network::{DrainId, FixtureId, Network, VentId};
+use crate::quantity::Length;
 
 /// Where the air comes from at the joint where a drain begins.
 #[derive(Debug, Clone, Copy, PartialEq, Eq, Hash)]
@@ -31,10 +33,10 @@ pub struct TrapAir {
 }
 
 impl Names {
-    pub(super) fn trace_air(&mut self, network: &Network, loads: &Loads) {
+    pub(super) fn trace_air(&mut self, network: &Network, edition: &Edition, loads: &Loads) {
         self.admit(network);
-        self.trace_traps(network, loads);
-        self.mark_wet_vents(network);
+        self.trace_traps(network, edition, loads);
+        self.mark_wet_vents(network, edition);
     }
 
     /// Finds where air is admitted, from the traps down. Of several ways the shortest counts.
@@ -68,12 +70,12 @@ impl Names {
     }
 
     /// Follows every trap down its fixture drain to the first joint that admits air.
-    fn trace_traps(&mut self, network: &Network, loads: &Loads) {
+    fn trace_traps(&mut self, network: &Network, edition: &Edition, loads: &Loads) {
         let drains = &network.drains;
         refill(&mut self.trap_arm, drains.len(), false);
         refill(&mut self.wet, drains.len(), false);
         self.trap.clear();
-        for start in &network.fixtures.drain {
+        for (fixture, start) in network.fixtures.drain.iter().enumerate() {
             let mut end = *start;
             let found = loop {
                 let Some(joint) = drains.next[end.index()] else { break Air::None };
@@ -84,6 +86,9 @@ impl Names {
                 }
                 end = joint;
             };
+            // A floor drain that needs no vent is not made to need a wet one.
+            let exempt = !matches!(found, Air::Vent(_)) && may_go_without(network, edition, fixture, end);
+            let found = if exempt { Air::None } else { found };
             let trap = match found {
                 Air::None => TrapAir { arm_end: end, vent: None, counted: None, wet: None },
                 Air::Vent(vent) => TrapAir { arm_end: end, vent: Some(vent), counted: Some(vent), wet: None },
@@ -108,7 +113,7 @@ impl Names {
     }
 
     /// Marks each wet vent up to its dry vent, and tells every trap the vent that its air comes from.
-    fn mark_wet_vents(&mut self, network: &Network) {
+    fn mark_wet_vents(&mut self, network: &Network, edition: &Edition) {
         let drains = &network.drains;
         refill(&mut self.wet_end, drains.len(), None);
         for index in (0..drains.len()).rev() {
@@ -135,11 +140,14 @@ impl Names {
             self.vent_of_air.push(vent);
         }
         self.find_next_vents(network);
-        for trap in &mut self.trap {
+        for (fixture, trap) in self.trap.iter_mut().enumerate() {
             if let Some(wet) = trap.wet {
                 trap.vent = self.vent_of_air[wet.index()];
             }
-            trap.counted = trap.vent.or(self.next_vent[trap.arm_end.index()]);
+            trap.counted = trap.vent;
+            if trap.vent.is_none() && !may_go_without(network, edition, fixture, trap.arm_end) {
+                trap.counted = self.next_vent[trap.arm_end.index()];
+            }
         }
     }
 
@@ -174,4 +182,21 @@ impl Names {
         }
         (wet, dry)
     }
+}
+
+/// Whether a floor drain has the trap and the length of fixture drain that let it go without a vent (NPC 2015, 2.5.1.1.(3)). Its
+/// fall is looked at by the check of traps without vents.
+fn may_go_without(network: &Network, edition: &Edition, fixture: usize, end: DrainId) -> bool {
+    let fixtures = &network.fixtures;
+    if !matches!(fixtures.class[fixture], FixtureClass::FloorDrain | FixtureClass::EmergencyFloorDrain) {
+        return false;
+    }
+    let rule = edition.rules.floor_drain_unvented.value;
+    let mut length = Length::ZERO;
+    let mut pipe = Some(fixtures.drain[fixture]);
+    while let Some(at) = pipe {
+        length = length + network.drains.length[at.index()].unwrap_or(Length::ZERO);
+        pipe = network.drains.next[at.index()].filter(|_| at != end);
+    }
+    fixtures.trap[fixture].value >= rule.least_trap && length >= rule.least_length
 }

@@ -14,7 +14,11 @@ impl Names {
     pub(super) fn name_main_line(&mut self, network: &Network, edition: &Edition, loads: &Loads) {
         self.name_building_sewer(network, edition);
         let (start, reason) = self.upstream_end(network, edition, loads);
+        // It is horizontal piping: a drop at its upper end still belongs to what drains into it.
         let mut drain = start;
+        while let Some(at) = drain.filter(|at| network.drains.vertical[at.index()]) {
+            drain = network.drains.next[at.index()];
+        }
         while let Some(at) = drain.filter(|at| self.drain[at.index()] != DrainName::BuildingSewer) {
             self.drain[at.index()] = DrainName::BuildingDrain;
             self.reason[at.index()] = reason;

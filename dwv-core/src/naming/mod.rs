@@ -59,7 +59,7 @@ impl Names {
     pub fn find(&mut self, network: &Network, edition: &Edition, loads: &Loads) {
         self.find_stacks(network, edition, loads);
         self.name_drains(network, edition, loads);
-        self.trace_air(network, loads);
+        self.trace_air(network, edition, loads);
         self.name_vents(network, loads);
     }
 
