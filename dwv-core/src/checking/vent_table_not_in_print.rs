@@ -1,7 +1,6 @@
 //! A vent that is sized by a table known from memory only (NPC 2015, Table 2.5.8.3.).
 
 use super::{Case, Check, Finding, Report, Severity, Subject};
-use crate::network::VentId;
 use crate::sizing::Rule;
 
 pub(super) const CHECK: Check = Check {
@@ -14,24 +13,29 @@ pub(super) const CHECK: Check = Check {
     words,
 };
 
+/// One finding for all of them: each such vent is marked as provisional in its row.
 fn run(case: &Case<'_>, report: &mut Report<'_>) {
-    for index in 0..case.operands.network.vents.len() {
-        let reasons = case.sizes.vent_reasons.of(index);
-        let unsure = reasons.iter().any(|reason| {
-            let witness = case.operands.edition.citation(reason.citation).witness;
-            reason.rule == Rule::VentLength && !witness.is_attested()
-        });
-        if unsure {
-            report.add(Severity::CannotDecide, Subject::Vent(VentId::new(index)), 0, 0);
-        }
+    let count = unsure(case).count();
+    if count > 0 {
+        report.add(Severity::CannotDecide, Subject::Layout, count as i64, 0);
     }
 }
 
+/// The vents whose size the table bears on.
+fn unsure<'a>(case: &'a Case<'_>) -> impl Iterator<Item = usize> + 'a {
+    (0..case.operands.network.vents.len()).filter(|vent| {
+        case.sizes.vent_reasons.of(*vent).iter().any(|reason| {
+            reason.rule == Rule::VentLength && !case.operands.edition.citation(reason.citation).witness.is_attested()
+        })
+    })
+}
+
 fn words(case: &Case<'_>, finding: &Finding) -> String {
-    let Subject::Vent(vent) = finding.subject else { return String::new() };
-    format!(
-        "the size of the vent `{}`, {} in, is provisional: its table is known from memory only",
-        case.operands.network.vents.id[vent.index()],
-        case.sizes.vent[vent.index()]
-    )
+    const SHOWN: usize = 12;
+    let ids: Vec<String> =
+        unsure(case).take(SHOWN).map(|vent| format!("`{}`", case.operands.network.vents.id[vent])).collect();
+    let more = if finding.found as usize > SHOWN { " …" } else { "" };
+    let sizes = if finding.found == 1 { "the size of 1 vent is" } else { "the sizes of {} vents are" };
+    let sizes = sizes.replace("{}", &finding.found.to_string());
+    format!("{sizes} provisional, for their table is known from memory only: {}{more}", ids.join(", "))
 }

@@ -4,6 +4,7 @@ use serde::{Deserialize, Serialize};
 
 /// How a value is attested, the best first.
 #[derive(Debug, Clone, Copy, PartialEq, Eq, PartialOrd, Ord, Hash, Serialize, Deserialize)]
+#[cfg_attr(feature = "schema", derive(schemars::JsonSchema))]
 #[serde(rename_all = "kebab-case")]
 pub enum Witness {
     /// Two or more independent printed sources.

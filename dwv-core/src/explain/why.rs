@@ -8,7 +8,7 @@ use crate::loading::VentLoads;
 use crate::naming::VentName;
 use crate::network::{DrainId, FixtureId, VentEnd, VentId};
 use crate::quantity::SlopeNotation;
-use crate::schedule::CAUTION;
+use crate::schedule::{CAUTION, Status};
 use crate::sizing::{Reason, Reasons};
 use crate::{Sizing, edition::CitationId};
 
@@ -85,6 +85,7 @@ impl Sizing {
             line(&mut text, "serves as a wet vent");
         }
         self.write_reasons(&mut text, &columns.sizes.drain_reasons, index);
+        self.write_status(&mut text, self.drain_status(index));
         match columns.sizes.room[index] {
             Some(room) => line(&mut text, &format!("room: {room} FU more before a table asks for a larger size")),
             None => line(&mut text, "room: no load table bears on it"),
@@ -143,6 +144,7 @@ impl Sizing {
             line(&mut text, &format!("neither load nor length counts for it ({clause})"));
         }
         self.write_reasons(&mut text, &columns.sizes.vent_reasons, index);
+        self.write_status(&mut text, self.vent_status(index));
         text
     }
 
@@ -173,6 +175,17 @@ impl Sizing {
             line(&mut text, &format!("way of the air: {}", row.air_path.join(", ")));
         }
         text
+    }
+
+    /// How far a size is decided, when it is not.
+    fn write_status(&self, text: &mut String, status: Status) {
+        match status {
+            Status::Decided => {}
+            Status::Provisional => line(text, "provisional: it rests on a value that nobody here has seen in print"),
+            Status::CannotDecide => {
+                line(text, "cannot be decided: a length is missing, a table ends, or a value was not seen in print")
+            }
+        }
     }
 
     fn size_words(&self, size: Option<crate::quantity::PipeSize>) -> String {

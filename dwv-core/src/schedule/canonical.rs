@@ -7,6 +7,7 @@ use crate::Sizing;
 
 /// The whole result.
 #[derive(Serialize)]
+#[cfg_attr(feature = "schema", derive(schemars::JsonSchema))]
 struct Canonical {
     format: &'static str,
     summary: Summary,
@@ -35,4 +36,16 @@ impl Sizing {
         text.push('\n');
         text
     }
+}
+
+/// The JSON Schema of the canonical result.
+#[cfg(feature = "schema")]
+#[must_use]
+pub fn sizing_schema() -> String {
+    let mut schema = schemars::schema_for!(Canonical);
+    schema.insert("$id".to_owned(), "dwv-sizing-1.schema.json".into());
+    schema.insert("title".to_owned(), "dwv sizing, version 1".into());
+    let mut text = serde_json::to_string_pretty(&schema).unwrap_or_default();
+    text.push('\n');
+    text
 }

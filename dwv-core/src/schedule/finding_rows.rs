@@ -11,6 +11,7 @@ use super::Status;
 
 /// Something that breaks the code, or that cannot be decided.
 #[derive(Debug, Clone, PartialEq, Eq, Serialize)]
+#[cfg_attr(feature = "schema", derive(schemars::JsonSchema))]
 pub struct FindingRow {
     /// The stable name of the check.
     pub check: &'static str,

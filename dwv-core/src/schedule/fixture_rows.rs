@@ -10,6 +10,7 @@ use crate::quantity::{FixtureUnits, Length, PipeSize};
 
 /// A fixture of the fixture-unit schedule.
 #[derive(Debug, Clone, PartialEq, Eq, Serialize)]
+#[cfg_attr(feature = "schema", derive(schemars::JsonSchema))]
 pub struct FixtureRow {
     /// The id in the drawing.
     pub id: String,
@@ -27,9 +28,11 @@ pub struct FixtureRow {
     pub future: bool,
     /// The developed length of the trap arm; none when no air reaches it or a length is missing. In metres in JSON.
     #[serde(rename = "trap_arm_m", serialize_with = "metres")]
+    #[cfg_attr(feature = "schema", schemars(with = "Option<f64>"))]
     pub trap_arm_length: Option<Length>,
     /// How far the trap arm falls, in metres in JSON.
     #[serde(rename = "trap_arm_fall_m", serialize_with = "metres")]
+    #[cfg_attr(feature = "schema", schemars(with = "Option<f64>"))]
     pub trap_arm_fall: Option<Length>,
     /// The vent that protects it; none when it has none.
     pub protected_by: Option<String>,

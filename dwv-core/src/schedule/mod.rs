@@ -9,10 +9,13 @@ mod schedules;
 mod summary;
 mod table;
 
+#[cfg(feature = "schema")]
+pub use canonical::sizing_schema;
 pub use finding_rows::FindingRow;
 pub use fixture_rows::FixtureRow;
 pub use pipe_rows::{PipeRow, TerminalRow, VentRow};
 pub use reason_rows::{ReasonRow, Status};
+pub use schedules::SCHEDULES;
 pub use summary::Summary;
 pub use table::Table;
 

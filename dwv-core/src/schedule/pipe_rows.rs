@@ -24,6 +24,7 @@ fn elevation<S: Serializer>(elevation: &Option<Elevation>, serializer: S) -> Res
 
 /// A drain of the pipe schedule.
 #[derive(Debug, Clone, PartialEq, Eq, Serialize)]
+#[cfg_attr(feature = "schema", derive(schemars::JsonSchema))]
 pub struct PipeRow {
     /// The id in the drawing.
     pub id: String,
@@ -57,15 +58,19 @@ pub struct PipeRow {
     pub slope: Option<String>,
     /// The developed length, in metres in JSON.
     #[serde(rename = "length_m", serialize_with = "metres")]
+    #[cfg_attr(feature = "schema", schemars(with = "Option<f64>"))]
     pub length: Option<Length>,
     /// The fall, in metres in JSON.
     #[serde(rename = "fall_m", serialize_with = "metres")]
+    #[cfg_attr(feature = "schema", schemars(with = "Option<f64>"))]
     pub fall: Option<Length>,
     /// The invert at the upper end, in metres in JSON.
     #[serde(rename = "invert_up_m", serialize_with = "elevation")]
+    #[cfg_attr(feature = "schema", schemars(with = "Option<f64>"))]
     pub invert_up: Option<Elevation>,
     /// The invert at the lower end, in metres in JSON.
     #[serde(rename = "invert_down_m", serialize_with = "elevation")]
+    #[cfg_attr(feature = "schema", schemars(with = "Option<f64>"))]
     pub invert_down: Option<Elevation>,
     /// Every minimum.
     pub reasons: Vec<ReasonRow>,
@@ -73,6 +78,7 @@ pub struct PipeRow {
 
 /// A vent of the vent schedule.
 #[derive(Debug, Clone, PartialEq, Eq, Serialize)]
+#[cfg_attr(feature = "schema", derive(schemars::JsonSchema))]
 pub struct VentRow {
     /// The id in the drawing.
     pub id: String,
@@ -90,9 +96,11 @@ pub struct VentRow {
     pub load: FixtureUnits,
     /// The developed length that it is sized by; none where length does not count. In metres in JSON.
     #[serde(rename = "developed_length_m", serialize_with = "metres")]
+    #[cfg_attr(feature = "schema", schemars(with = "Option<f64>"))]
     pub developed_length: Option<Length>,
     /// Its own length, in metres in JSON.
     #[serde(rename = "length_m", serialize_with = "metres")]
+    #[cfg_attr(feature = "schema", schemars(with = "Option<f64>"))]
     pub length: Option<Length>,
     /// The size; none when it cannot be decided.
     pub size: Option<PipeSize>,
@@ -108,6 +116,7 @@ pub struct VentRow {
 
 /// Where a vent ends in open air.
 #[derive(Debug, Clone, PartialEq, Eq, Serialize)]
+#[cfg_attr(feature = "schema", derive(schemars::JsonSchema))]
 pub struct TerminalRow {
     /// The id in the drawing.
     pub id: String,
@@ -117,6 +126,7 @@ pub struct TerminalRow {
     pub through: crate::layout::Through,
     /// How far it ends above the roof or the ground, in metres in JSON.
     #[serde(rename = "above_m", serialize_with = "metres")]
+    #[cfg_attr(feature = "schema", schemars(with = "Option<f64>"))]
     pub above: Option<Length>,
     /// The size where it passes to open air; none when it cannot be decided.
     pub size: Option<PipeSize>,
@@ -136,12 +146,12 @@ impl Sizing {
         (!refused).then_some(size)
     }
 
-    fn drain_status(&self, index: usize) -> Status {
+    pub(crate) fn drain_status(&self, index: usize) -> Status {
         let beyond = self.columns.sizes.drain_beyond.binary_search(&DrainId::new(index)).is_ok();
         self.status(&self.columns.sizes.drain_reasons, index, false, beyond)
     }
 
-    fn vent_status(&self, index: usize) -> Status {
+    pub(crate) fn vent_status(&self, index: usize) -> Status {
         let loads = &self.columns.vent_loads;
         let missing = loads.length_missing[index] && VentLoads::length_counts(self.columns.names.vent[index].name);
         let beyond = self.columns.sizes.vent_beyond.binary_search(&VentId::new(index)).is_ok();

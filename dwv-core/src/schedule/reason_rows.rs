@@ -11,6 +11,7 @@ use crate::sizing_run::Unattested;
 
 /// How far a size is decided.
 #[derive(Debug, Clone, Copy, PartialEq, Eq, Hash, Serialize)]
+#[cfg_attr(feature = "schema", derive(schemars::JsonSchema))]
 #[serde(rename_all = "kebab-case")]
 pub enum Status {
     /// Decided by values that were seen in print, by practice or by the drawing.
@@ -35,6 +36,7 @@ impl Status {
 
 /// One minimum of a size.
 #[derive(Debug, Clone, PartialEq, Eq, Serialize)]
+#[cfg_attr(feature = "schema", derive(schemars::JsonSchema))]
 pub struct ReasonRow {
     /// The stable name of the rule.
     pub rule: &'static str,

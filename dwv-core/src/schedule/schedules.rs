@@ -2,12 +2,40 @@
 
 use super::{Status, Table};
 use crate::Sizing;
+use crate::error::{Error, ErrorKind, Fault, FaultCode, nearest};
 use crate::quantity::{Length, LengthUnit, PipeSize};
 
 const LEFT: bool = false;
 const RIGHT: bool = true;
 
+/// The names of the schedules.
+pub const SCHEDULES: [&str; 5] = ["pipes", "vents", "fixtures", "inverts", "findings"];
+
 impl Sizing {
+    /// A schedule by its name, one of [`SCHEDULES`].
+    ///
+    /// # Errors
+    /// Any other name; the nearest is told.
+    pub fn schedule(&self, name: &str) -> Result<Table, Error> {
+        match name {
+            "pipes" => Ok(self.pipe_schedule()),
+            "vents" => Ok(self.vent_schedule()),
+            "fixtures" => Ok(self.fixture_schedule()),
+            "inverts" => Ok(self.invert_schedule()),
+            "findings" => Ok(self.finding_schedule()),
+            _ => {
+                let fault = Fault::new(FaultCode::UnknownWord, "", format!("no schedule has the name `{name}`"));
+                Err(Error::one(
+                    ErrorKind::Question,
+                    match nearest(name, SCHEDULES) {
+                        Some(near) => fault.help(format!("did you mean `{near}`?")),
+                        None => fault.help(format!("the schedules are {}", SCHEDULES.join(", "))),
+                    },
+                ))
+            }
+        }
+    }
+
     /// Every drain with its name, load, size, what governs it and its room.
     #[must_use]
     pub fn pipe_schedule(&self) -> Table {

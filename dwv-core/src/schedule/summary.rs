@@ -9,6 +9,7 @@ use crate::quantity::FixtureUnits;
 
 /// What was sized, by which edition and readings, and how sure it is.
 #[derive(Debug, Clone, PartialEq, Eq, Serialize)]
+#[cfg_attr(feature = "schema", derive(schemars::JsonSchema))]
 pub struct Summary {
     /// What the drawing is called.
     pub name: String,
