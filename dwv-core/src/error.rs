@@ -240,7 +240,8 @@ impl Faults {
 
 /// The word of `known` that is nearest to `word`, when it is near enough to be meant.
 pub(crate) fn nearest<'a>(word: &str, known: impl IntoIterator<Item = &'a str>) -> Option<&'a str> {
-    let most = (word.chars().count() / 3).clamp(1, 3);
+    // One letter in three may be wrong; of a word of one or two letters only its case.
+    let most = (word.chars().count() / 3).min(3);
     known
         .into_iter()
         .map(|candidate| (edits(word, candidate), candidate))

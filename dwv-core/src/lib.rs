@@ -47,3 +47,8 @@ pub use error::{Error, ErrorKind, Fault, FaultCode};
 pub use layout::Layout;
 pub use network::Network;
 pub use sizing_run::{Columns, Sizing, Unattested};
+
+/// The README's examples run as tests.
+#[cfg(doctest)]
+#[doc = include_str!("../../README.md")]
+mod readme {}

@@ -319,11 +319,6 @@ impl<'a> Build<'a> {
             .iter()
             .enumerate()
             .map(|(index, drain)| {
-                if drain.from == drain.to {
-                    let message = format!("the drain `{}` begins and ends at `{}`", drain.id, drain.to);
-                    let fault = Fault::new(FaultCode::Cycle, format!("drains[{index}].to"), message);
-                    faults.push(fault.of(&drain.id).help("correct one of its ends"));
-                }
                 let to = place(ends.to[index].map(Element::Joint));
                 DrainEnds { drain, path: index, from: place(ends.from[index]), to }.run(self.reader, faults)
             })

@@ -39,7 +39,7 @@ impl FixtureUnits {
     /// A number below zero, above a thousand million or not finite.
     pub fn from_number(number: f64) -> Result<Self, QuantityError> {
         if !(0.0..=1e9).contains(&number) {
-            let input = number.to_string();
+            let input = shown(&format!("{number:?}"));
             return Err(QuantityError::OutOfRange { what: WHAT, input, expected: "0 to 1000000000 fixture units" });
         }
         Ok(Self((number * 1000.0).round() as u64))
