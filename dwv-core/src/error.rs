@@ -226,15 +226,13 @@ impl Faults {
         }
     }
 
-    pub(crate) fn is_empty(&self) -> bool {
-        self.total == 0
+    pub(crate) fn into_result<T>(self, kind: ErrorKind, value: T) -> Result<T, Error> {
+        if self.total == 0 { Ok(value) } else { Err(self.into_error(kind)) }
     }
 
-    pub(crate) fn into_result<T>(self, kind: ErrorKind, value: T) -> Result<T, Error> {
-        if self.total == 0 {
-            return Ok(value);
-        }
-        Err(Error(Box::new(Inner { kind, faults: self.list, total: self.total })))
+    /// The error with what was gathered.
+    pub(crate) fn into_error(self, kind: ErrorKind) -> Error {
+        Error(Box::new(Inner { kind, faults: self.list, total: self.total }))
     }
 }
 

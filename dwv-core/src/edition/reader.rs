@@ -28,13 +28,10 @@ impl Edition {
             Error::one(ErrorKind::Edition, fault)
         })?;
         let mut faults = Faults::default();
-        let edition = build(raw, &mut faults);
-        match edition {
+        match build(raw, &mut faults) {
             Some(edition) => faults.into_result(ErrorKind::Edition, edition),
-            None => faults.into_result(ErrorKind::Edition, ()).and_then(|()| {
-                let fault = Fault::new(FaultCode::WrongFormat, "", "the edition lacks rules");
-                Err(Error::one(ErrorKind::Edition, fault))
-            }),
+            // A rule is missing or cannot be read, which is among the faults.
+            None => Err(faults.into_error(ErrorKind::Edition)),
         }
     }
 }

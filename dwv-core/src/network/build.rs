@@ -2,12 +2,10 @@
 
 use super::drain_order::{self, DrainOrder, Ends};
 use super::fixture::{self, Demand};
-use super::geometry::{DrainEnds, Place, Reader, Run, vent_length};
+use super::geometry::{DrainEnds, Place, Reader, Run};
 use super::register::{Element, Register, check_id};
-use super::vent_order::{self, VentEnds, VentOrder};
-use super::{
-    DrainId, Drains, FixtureId, Fixtures, GroupRow, LevelRow, Network, Storey, TerminalRow, ValveRow, VentId, Vents,
-};
+use super::vent_order::{self, VentOrder};
+use super::{DrainId, Drains, FixtureId, Fixtures, GroupRow, LevelRow, Network, Storey, VentId};
 use crate::edition::Edition;
 use crate::error::{Error, ErrorKind, Fault, FaultCode, Faults, nearest};
 use crate::layout::{Id, Layout, Position, limits};
@@ -20,22 +18,16 @@ impl Network {
     /// All faults of the drawing together: unknown and repeated ids, drains that run in a circle or do not reach the
     /// sewer, vents without air, lengths that contradict positions, kinds that the edition does not list.
     pub fn new(layout: &Layout, edition: &Edition) -> Result<Self, Error> {
+        check_counts(layout)?;
         let mut faults = Faults::default();
-        check_counts(layout, &mut faults);
-        if !faults.is_empty() {
-            return faults.into_result(ErrorKind::Drawing, ()).and_then(|()| unreachable_network());
-        }
         let network = Build::new(layout, edition, &mut faults).network(&mut faults);
         faults.into_result(ErrorKind::Drawing, network)
     }
 }
 
-fn unreachable_network() -> Result<Network, Error> {
-    let fault = Fault::new(FaultCode::OutOfRange, "", "the layout is larger than the engine takes");
-    Err(Error::one(ErrorKind::Drawing, fault))
-}
-
-fn check_counts(layout: &Layout, faults: &mut Faults) {
+/// A drawing without levels, fixtures or drains, or with more than the engine takes, is looked at no further.
+fn check_counts(layout: &Layout) -> Result<(), Error> {
+    let mut faults = Faults::default();
     let counts = [
         ("levels", layout.levels.len(), limits::MOST_LEVELS),
         ("fixtures", layout.fixtures.len(), limits::MOST_ELEMENTS),
@@ -55,17 +47,18 @@ fn check_counts(layout: &Layout, faults: &mut Faults) {
             faults.push(Fault::new(FaultCode::MissingKey, path, format!("the layout has no {path}")));
         }
     }
+    faults.into_result(ErrorKind::Drawing, ())
 }
 
 /// What is worked out of a layout before the columns are filled.
-struct Build<'a> {
-    layout: &'a Layout,
+pub(super) struct Build<'a> {
+    pub(super) layout: &'a Layout,
     edition: &'a Edition,
-    register: Register<'a>,
-    reader: Reader,
+    pub(super) register: Register<'a>,
+    pub(super) reader: Reader,
     levels: Vec<LevelRow>,
     fixtures: Vec<Place>,
-    joints: Vec<Place>,
+    pub(super) joints: Vec<Place>,
 }
 
 impl<'a> Build<'a> {
@@ -94,7 +87,7 @@ impl<'a> Build<'a> {
         build
     }
 
-    fn place(
+    pub(super) fn place(
         &self,
         level: Option<&Id>,
         height: Option<Measure>,
@@ -121,7 +114,7 @@ impl<'a> Build<'a> {
         Place { elevation: Some(elevation), height_stated: height.is_some(), at, storey: Some(storey) }
     }
 
-    fn place_of(&self, element: Element) -> Place {
+    pub(super) fn place_of(&self, element: Element) -> Place {
         match element {
             Element::Fixture(index) => self.fixtures[index as usize],
             Element::Joint(index) => self.joints[index as usize],
@@ -174,7 +167,7 @@ impl<'a> Build<'a> {
         }
     }
 
-    fn joint(&self, id: &str, path: &str, owner: &str, faults: &mut Faults) -> Option<u32> {
+    pub(super) fn joint(&self, id: &str, path: &str, owner: &str, faults: &mut Faults) -> Option<u32> {
         match self.register.get(id) {
             Some(Element::Joint(joint)) => Some(joint),
             _ => {
@@ -208,108 +201,6 @@ impl<'a> Build<'a> {
             ends.to.push(to);
         }
         ends
-    }
-
-    fn vent_ends(&self, faults: &mut Faults) -> VentEnds {
-        let count = self.layout.vents.len();
-        let mut ends = VentEnds { from: Vec::with_capacity(count), to: Vec::with_capacity(count) };
-        for (index, vent) in self.layout.vents.iter().enumerate() {
-            let from = match self.register.get(&vent.from) {
-                Some(Element::Joint(joint)) => Some(joint),
-                _ => {
-                    let path = format!("vents[{index}].from");
-                    faults.push(self.register.wrong_end(&vent.from, path, &vent.id, &["joint"]));
-                    None
-                }
-            };
-            let to = match self.register.get(&vent.to) {
-                found @ Some(Element::Joint(_) | Element::Terminal(_) | Element::Valve(_)) => found,
-                _ => {
-                    let path = format!("vents[{index}].to");
-                    let expected = ["joint", "terminal", "valve"];
-                    faults.push(self.register.wrong_end(&vent.to, path, &vent.id, &expected));
-                    None
-                }
-            };
-            ends.from.push(from);
-            ends.to.push(to);
-        }
-        ends
-    }
-
-    fn check_sewer(&self, sewer: Option<u32>, ends: &Ends, vents: &VentOrder, faults: &mut Faults) {
-        let Some(sewer) = sewer else { return };
-        let id = &self.layout.sewer.at;
-        if !ends.to.contains(&Some(sewer)) {
-            let message = format!("no drain ends at the sewer connection `{id}`");
-            let fault = Fault::new(FaultCode::ReachesNoSewer, "sewer.at", message);
-            faults.push(fault.help("lead the building's piping to it, or name the joint where it ends"));
-        }
-        if let Some(drain) = ends.from.iter().position(|from| *from == Some(Element::Joint(sewer))) {
-            let drain_id = &self.layout.drains[drain].id;
-            let message = format!("the drain `{drain_id}` leaves the sewer connection `{id}`, where the piping ends");
-            let fault = Fault::new(FaultCode::WrongEnd, format!("drains[{drain}].from"), message);
-            faults.push(fault.of(drain_id).help("name the joint at its lower end as the sewer connection"));
-        }
-        if let Some(vent) = vents.leaving[sewer as usize] {
-            let drawn = vents.drawn[vent as usize];
-            let vent_id = &self.layout.vents[drawn as usize].id;
-            let message = format!("the vent `{vent_id}` leaves the sewer connection `{id}`");
-            let fault = Fault::new(FaultCode::WrongEnd, format!("vents[{drawn}].from"), message);
-            faults.push(fault.of(vent_id).help("let it leave a joint upstream of the connection"));
-        }
-    }
-
-    /// Drains that carry nothing, vents that begin nowhere, cleanouts at no joint.
-    fn check_loose_ends(
-        &self,
-        ends: &Ends,
-        vent_ends: &VentEnds,
-        drains: &DrainOrder,
-        vents: &VentOrder,
-        faults: &mut Faults,
-    ) {
-        let layout = self.layout;
-        let mut met = vec![false; layout.joints.len()];
-        ends.to.iter().flatten().for_each(|joint| met[*joint as usize] = true);
-        let mut reachable = vec![false; layout.joints.len()];
-        for cleanout in layout.cleanouts.iter().enumerate() {
-            let (index, cleanout) = cleanout;
-            if let Some(joint) = self.joint(&cleanout.at, &format!("cleanouts[{index}].at"), &cleanout.id, faults) {
-                reachable[joint as usize] = true;
-            }
-        }
-        for (index, from) in ends.from.iter().enumerate() {
-            if let Some(Element::Joint(joint)) = from
-                && !met[*joint as usize]
-                && !reachable[*joint as usize]
-                && vents.leaving[*joint as usize].is_none()
-            {
-                let drain = &layout.drains[index];
-                let message =
-                    format!("the drain `{}` begins at `{}`, where nothing drains into it", drain.id, drain.from);
-                let fault = Fault::new(FaultCode::DeadEnd, format!("drains[{index}].from"), message);
-                faults.push(
-                    fault.of(&drain.id).help("connect a fixture, a cleanout or a vent there, or take the drain out"),
-                );
-            }
-        }
-        for to in vent_ends.to.iter().flatten() {
-            if let Element::Joint(joint) = to {
-                met[*joint as usize] = true;
-            }
-        }
-        for (index, from) in vent_ends.from.iter().enumerate() {
-            if let Some(joint) = from
-                && !met[*joint as usize]
-                && drains.leaving[*joint as usize].is_none()
-            {
-                let vent = &layout.vents[index];
-                let message = format!("the vent `{}` begins at `{}`, where no pipe meets it", vent.id, vent.from);
-                let fault = Fault::new(FaultCode::WrongEnd, format!("vents[{index}].from"), message);
-                faults.push(fault.of(&vent.id).help("let it begin at a joint on a drain or where other vents meet"));
-            }
-        }
     }
 
     fn runs(&self, ends: &Ends, faults: &mut Faults) -> Vec<Run> {
@@ -420,117 +311,6 @@ impl<'a> Build<'a> {
             }
         }
         (fixtures, rows)
-    }
-
-    fn vents(
-        &self,
-        ends: &VentEnds,
-        order: &VentOrder,
-        drains: &DrainOrder,
-        faults: &mut Faults,
-    ) -> (Vents, Vec<TerminalRow>, Vec<ValveRow>) {
-        let layout = self.layout;
-        let terminal_place: Vec<Place> = layout
-            .terminals
-            .iter()
-            .enumerate()
-            .map(|(index, it)| {
-                self.place(it.level.as_ref(), it.height, it.at, &it.id, || format!("terminals[{index}]"), faults)
-            })
-            .collect();
-        let valve_place: Vec<Place> = layout
-            .valves
-            .iter()
-            .enumerate()
-            .map(|(index, it)| {
-                self.place(it.level.as_ref(), it.height, it.at, &it.id, || format!("valves[{index}]"), faults)
-            })
-            .collect();
-        let lengths: Vec<Option<Length>> = layout
-            .vents
-            .iter()
-            .enumerate()
-            .map(|(index, vent)| {
-                let from = ends.from[index].map_or(Place::UNKNOWN, |joint| self.joints[joint as usize]);
-                let to = match ends.to[index] {
-                    Some(Element::Terminal(terminal)) => terminal_place[terminal as usize],
-                    Some(Element::Valve(valve)) => valve_place[valve as usize],
-                    Some(element) => self.place_of(element),
-                    None => Place::UNKNOWN,
-                };
-                vent_length(vent, &format!("vents[{index}]"), &from, &to, self.reader, faults)
-            })
-            .collect();
-        let each = || order.drawn.iter().map(|drawn| *drawn as usize);
-        let vent = |index: usize| &layout.vents[index];
-        let drain = |index: usize| {
-            let joint = ends.from[index]?;
-            drains.leaving[joint as usize].map(|drain| DrainId::new(drain as usize))
-        };
-        let columns = Vents {
-            id: each().map(|index| vent(index).id.clone()).collect(),
-            drawn: order.drawn.clone(),
-            from: each().map(|index| vent(index).from.clone()).collect(),
-            to: each().map(|index| vent(index).to.clone()).collect(),
-            next: order.next.iter().map(|next| next.map(|next| VentId::new(next as usize))).collect(),
-            first: order.first.clone(),
-            end: order.end.clone(),
-            drain: each().map(drain).collect(),
-            length: each().map(|index| lengths[index]).collect(),
-            stated_size: each().map(|index| vent(index).size).collect(),
-            stated_name: each().map(|index| vent(index).name).collect(),
-        };
-        let arriving = self.arriving_vents(ends, order, faults);
-        let mut terminals = Vec::new();
-        for (index, terminal) in layout.terminals.iter().enumerate() {
-            let path = || format!("terminals[{index}].above");
-            let above = self.reader.read(terminal.above, &limits::HEIGHT, path, faults);
-            if let Some(vent) = arriving.get(&Element::Terminal(index as u32)) {
-                terminals.push(TerminalRow { id: terminal.id.clone(), through: terminal.through, above, vent: *vent });
-            }
-        }
-        let mut valves = Vec::new();
-        for (index, valve) in layout.valves.iter().enumerate() {
-            if let Some(vent) = arriving.get(&Element::Valve(index as u32)) {
-                valves.push(ValveRow { id: valve.id.clone(), grounds: valve.grounds, vent: *vent });
-            }
-        }
-        (columns, terminals, valves)
-    }
-
-    /// The one vent that ends at each terminal and valve.
-    fn arriving_vents(
-        &self,
-        ends: &VentEnds,
-        order: &VentOrder,
-        faults: &mut Faults,
-    ) -> std::collections::HashMap<Element, VentId> {
-        let layout = self.layout;
-        let mut number = vec![None; layout.vents.len()];
-        for (index, drawn) in order.drawn.iter().enumerate() {
-            number[*drawn as usize] = Some(VentId::new(index));
-        }
-        let mut arriving = std::collections::HashMap::new();
-        for (index, to) in ends.to.iter().enumerate() {
-            let Some(element @ (Element::Terminal(_) | Element::Valve(_))) = to else { continue };
-            let Some(vent) = number[index] else { continue };
-            if arriving.insert(*element, vent).is_some() {
-                let vent = &layout.vents[index];
-                let message = format!("more than one vent ends at the {} `{}`", element.word(), vent.to);
-                let fault = Fault::new(FaultCode::WrongEnd, format!("vents[{index}].to"), message);
-                faults.push(fault.of(&vent.id).help("let the vents meet at a joint and lead one vent on to it"));
-            }
-        }
-        let ids = layout.terminals.iter().enumerate().map(|(index, it)| (Element::Terminal(index as u32), &it.id));
-        let ids = ids.chain(layout.valves.iter().enumerate().map(|(index, it)| (Element::Valve(index as u32), &it.id)));
-        for (element, id) in ids {
-            if !arriving.contains_key(&element) {
-                let message = format!("no vent ends at the {} `{id}`", element.word());
-                let fault = Fault::new(FaultCode::WrongEnd, element.path(), message);
-                faults.push(fault.of(id).help("lead a vent to it, or take it out"));
-            }
-        }
-        arriving
     }
 
     /// The sizes that an answer may take: those of the edition, or those at hand.

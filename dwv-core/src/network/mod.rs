@@ -9,7 +9,9 @@ mod dense;
 mod drain_order;
 mod fixture;
 mod geometry;
+mod loose_ends;
 mod register;
+mod vent_columns;
 mod vent_order;
 
 pub use dense::{DrainId, FixtureId, VentId};

@@ -8,6 +8,7 @@ mod reason_rows;
 mod schedules;
 mod summary;
 mod table;
+mod why;
 
 #[cfg(feature = "schema")]
 pub use canonical::sizing_schema;

@@ -2,13 +2,13 @@
 
 use std::fmt::Write;
 
-use super::{drain_name, name_reason, says, vent_name};
+use super::{CAUTION, Status};
 use crate::error::{Error, ErrorKind, Fault, FaultCode, nearest};
+use crate::explain::{drain_name, name_reason, says, vent_name};
 use crate::loading::VentLoads;
 use crate::naming::VentName;
 use crate::network::{DrainId, FixtureId, VentEnd, VentId};
 use crate::quantity::SlopeNotation;
-use crate::schedule::{CAUTION, Status};
 use crate::sizing::{Reason, Reasons};
 use crate::{Sizing, edition::CitationId};
 
