@@ -178,6 +178,10 @@ pub struct dwv_fixture_row {
     pub level: dwv_text,
     /// Its trap.
     pub trap: dwv_pipe_size,
+    /// The least size of its outlet pipe; undecided when the edition lists none.
+    pub outlet: dwv_pipe_size,
+    /// The length of its outlet pipe.
+    pub outlet_length: dwv_measure,
     /// Its load in thousandths of a fixture unit.
     pub load_thousandths: u64,
     /// Where the load comes from.

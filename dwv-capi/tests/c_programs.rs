@@ -72,11 +72,7 @@ fn the_example_sizes_the_house() {
         assert!(shown.contains(line), "{line}:\n{shown}");
     }
     let output = run(&program, &["python-examples/house.layout.json", "bd4"], b"");
-    assert!(
-        !output.status.success() && text(&output.stderr).contains("did you mean `"),
-        "{}",
-        text(&output.stderr)
-    );
+    assert!(!output.status.success() && text(&output.stderr).contains("did you mean `"), "{}", text(&output.stderr));
     let output = run(&program, &["README.md"], b"");
     assert!(!output.status.success() && text(&output.stderr).starts_with("README.md: "), "{}", text(&output.stderr));
 }

@@ -131,6 +131,8 @@ impl Rows {
                 kind: self.texts.add(&row.kind),
                 level: self.texts.add(&row.level),
                 trap: self.size(Some(row.trap)),
+                outlet: self.size(row.outlet),
+                outlet_length: measure(row.outlet_length),
                 load_thousandths: row.load.thousandths(),
                 load_clause: self.texts.add(&row.load_clause),
                 trap_arm: measure(row.trap_arm_length),

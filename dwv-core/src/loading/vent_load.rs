@@ -142,7 +142,33 @@ impl VentLoads {
         }
     }
 
-    /// The storey and the drain at the foot of the longest way are not kept; this tells whether length counts for a name at all.
+    /// The vents along which the developed length of `vent` is measured, in the direction of the air's way out.
+    #[must_use]
+    pub fn way(&self, network: &Network, names: &Names, vent: VentId) -> Vec<VentId> {
+        let major = |vent: VentId| names.vent[vent.index()].name.is_major();
+        let mut way = vec![vent];
+        let mut first = vent;
+        loop {
+            let header = names.vent[first.index()].name == VentName::Header;
+            let before = network
+                .vents
+                .arriving(first)
+                .filter(|arriving| header || major(*arriving) == major(first))
+                .max_by_key(|arriving| self.up[arriving.index()].length);
+            let Some(before) = before else { break };
+            way.push(before);
+            first = before;
+        }
+        way.reverse();
+        let mut last = vent;
+        while let Some(next) = network.vents.next[last.index()].filter(|next| major(last) || !major(*next)) {
+            way.push(next);
+            last = next;
+        }
+        way
+    }
+
+    /// Whether load and length count at all for a vent of this name.
     #[must_use]
     pub fn length_counts(name: VentName) -> bool {
         !matches!(name, VentName::Individual | VentName::Dual | VentName::Spare)

@@ -20,6 +20,12 @@ pub struct FixtureRow {
     pub level: String,
     /// Its trap.
     pub trap: PipeSize,
+    /// The least size of its outlet pipe, when the edition lists it.
+    pub outlet: Option<PipeSize>,
+    /// The length of its outlet pipe, when stated. In metres in JSON.
+    #[serde(rename = "outlet_m", serialize_with = "metres")]
+    #[cfg_attr(feature = "schema", schemars(with = "Option<f64>"))]
+    pub outlet_length: Option<Length>,
     /// Its load.
     pub load: FixtureUnits,
     /// Where the load comes from.
@@ -69,6 +75,8 @@ impl Sizing {
                 .get(usize::from(fixtures.storey[index].0))
                 .map_or_else(String::new, |level| level.id.to_string()),
             trap: fixtures.trap[index].value,
+            outlet: fixtures.outlet[index].map(|outlet| outlet.value),
+            outlet_length: fixtures.outlet_length[index],
             load: load.value,
             load_clause,
             future: fixtures.future[index],

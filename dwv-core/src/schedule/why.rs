@@ -138,7 +138,10 @@ impl Sizing {
         let length = loads.length[index].rounded(network.length_unit);
         let missing = if loads.length_missing[index] { ", as far as lengths are known" } else { "" };
         if VentLoads::length_counts(role.name) {
-            line(&mut text, &format!("load {} FU, developed length {length}{missing}", loads.load[index]));
+            let way = loads.way(network, &columns.names, vent);
+            let way: Vec<String> = way.iter().map(|vent| format!("`{}`", vents.id[vent.index()])).collect();
+            line(&mut text, &format!("load: {} FU", loads.load[index]));
+            line(&mut text, &format!("developed length: {length}{missing}, measured along {}", way.join(", ")));
         } else {
             let clause = self.clause(self.edition.rules.individual_dual_size.citation);
             line(&mut text, &format!("neither load nor length counts for it ({clause})"));
@@ -164,6 +167,10 @@ impl Sizing {
         let row = &self.fixture_row(fixture);
         let mut text = format!("`{}`, {} on `{}`\n", row.id, row.kind, row.level);
         line(&mut text, &format!("load: {} FU ({})", row.load, row.load_clause));
+        if let Some(outlet) = row.outlet {
+            let length = row.outlet_length.map(|length| format!(", {} long", length.rounded(self.network.length_unit)));
+            line(&mut text, &format!("fixture outlet pipe: at least {outlet} in{}", length.unwrap_or_default()));
+        }
         line(&mut text, &format!("trap: {} in", row.trap));
         if let Some(length) = row.trap_arm_length {
             let unit = self.network.length_unit;

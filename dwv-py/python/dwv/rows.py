@@ -157,6 +157,10 @@ class FixtureRow:
     """Its level."""
     trap: str
     """The size of its trap."""
+    outlet: str | None
+    """The least size of its outlet pipe, when the edition lists it."""
+    outlet_m: float | None
+    """The length of its outlet pipe in metres, when stated."""
     load: float
     """Its load in fixture units."""
     load_clause: str
