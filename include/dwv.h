@@ -427,6 +427,14 @@ typedef struct {
    */
   dwv_pipe_size trap;
   /*
+   The least size of its outlet pipe; undecided when the edition lists none.
+   */
+  dwv_pipe_size outlet;
+  /*
+   The length of its outlet pipe.
+   */
+  dwv_measure outlet_length;
+  /*
    Its load in thousandths of a fixture unit.
    */
   uint64_t load_thousandths;
@@ -533,7 +541,7 @@ extern "C" {
 /*
  Opens an edition by its id, such as `npc-2015`. On `DWV_OK` the caller owns `*edition`.
 
- # Safety
+ Required of the caller:
  `id` has `length` readable bytes; `edition`, and `error` unless NULL, can be written to.
  */
 dwv_status dwv_edition_open(const char *id, size_t length, dwv_edition **edition, dwv_error **error);
@@ -541,7 +549,7 @@ dwv_status dwv_edition_open(const char *id, size_t length, dwv_edition **edition
 /*
  Frees an edition. NULL is accepted.
 
- # Safety
+ Required of the caller:
  `edition` is NULL or came from this library and was not freed.
  */
 void dwv_edition_free(dwv_edition *edition);
@@ -549,7 +557,7 @@ void dwv_edition_free(dwv_edition *edition);
 /*
  Where every value of an edition comes from, as a page in Markdown. The caller owns `*page`.
 
- # Safety
+ Required of the caller:
  `edition` came from this library and was not freed; `page`, and `error` unless NULL, can be written to.
  */
 dwv_status dwv_edition_provenance(const dwv_edition *edition, dwv_string **page, dwv_error **error);
@@ -557,7 +565,7 @@ dwv_status dwv_edition_provenance(const dwv_edition *edition, dwv_string **page,
 /*
  Answers a question written as JSON, such as `{"ask": "vent-for-trap", "trap": "2"}`. The caller owns `*answer`.
 
- # Safety
+ Required of the caller:
  `edition` came from this library and was not freed; `question` has `length` readable bytes; `answer`, and `error` unless NULL, can be
  written to.
  */
@@ -570,7 +578,7 @@ dwv_status dwv_edition_answer(const dwv_edition *edition,
 /*
  The answer itself. It lives until the answer is freed. NULL gives an empty text.
 
- # Safety
+ Required of the caller:
  `answer` is NULL or came from this library and was not freed.
  */
 dwv_text dwv_answer_text(const dwv_answer *answer);
@@ -578,7 +586,7 @@ dwv_text dwv_answer_text(const dwv_answer *answer);
 /*
  The clause of an answer. It lives until the answer is freed. NULL gives an empty text.
 
- # Safety
+ Required of the caller:
  `answer` is NULL or came from this library and was not freed.
  */
 dwv_text dwv_answer_clause(const dwv_answer *answer);
@@ -586,7 +594,7 @@ dwv_text dwv_answer_clause(const dwv_answer *answer);
 /*
  How sure an answer is: `printed-two` … `unsure`. It lives until the answer is freed. NULL gives an empty text.
 
- # Safety
+ Required of the caller:
  `answer` is NULL or came from this library and was not freed.
  */
 dwv_text dwv_answer_witness(const dwv_answer *answer);
@@ -594,7 +602,7 @@ dwv_text dwv_answer_witness(const dwv_answer *answer);
 /*
  Frees an answer. NULL is accepted.
 
- # Safety
+ Required of the caller:
  `answer` is NULL or came from this library and was not freed.
  */
 void dwv_answer_free(dwv_answer *answer);
@@ -602,7 +610,7 @@ void dwv_answer_free(dwv_answer *answer);
 /*
  The least vent for the largest trap that it serves; both in hundredths of an inch: 200 for a 2 in trap.
 
- # Safety
+ Required of the caller:
  `edition` came from this library and was not freed; `vent`, and `error` unless NULL, can be written to.
  */
 dwv_status dwv_vent_for_trap(const dwv_edition *edition,
@@ -614,7 +622,7 @@ dwv_status dwv_vent_for_trap(const dwv_edition *edition,
  The least drain for a load by its role, in hundredths of an inch; `role` is one of `dwv_drain_role`. The slope counts for building drains:
  `slope_rise` in `slope_run`, or 0 in 0 for the least slope of each size.
 
- # Safety
+ Required of the caller:
  `edition` came from this library and was not freed; `size_hundredths`, and `error` unless NULL, can be written to.
  */
 dwv_status dwv_drain_for_load(const dwv_edition *edition,
@@ -629,7 +637,7 @@ dwv_status dwv_drain_for_load(const dwv_edition *edition,
  The load of a kind of fixture in thousandths of a fixture unit. `trap_hundredths` is its trap in hundredths of an inch, or 0 for the
  trap of the table.
 
- # Safety
+ Required of the caller:
  `edition` came from this library and was not freed; `kind` has `length` readable bytes; `load_thousandths`, and `error` unless NULL,
  can be written to.
  */
@@ -643,7 +651,7 @@ dwv_status dwv_load_of_fixture(const dwv_edition *edition,
 /*
  The fall of a length in nanometres at a slope of `rise` in `run`, to the nearest nanometre.
 
- # Safety
+ Required of the caller:
  `fall_nm`, and `error` unless NULL, can be written to.
  */
 dwv_status dwv_fall(int64_t length_nm, uint32_t rise, uint32_t run, int64_t *fall_nm, dwv_error **error);
@@ -651,7 +659,7 @@ dwv_status dwv_fall(int64_t length_nm, uint32_t rise, uint32_t run, int64_t *fal
 /*
  Reads a length with its unit, such as `3'-6 1/2"` or `1.2 m`, as nanometres.
 
- # Safety
+ Required of the caller:
  `written` has `length` readable bytes; `length_nm`, and `error` unless NULL, can be written to.
  */
 dwv_status dwv_length_parse(const char *written, size_t length, int64_t *length_nm, dwv_error **error);
@@ -659,7 +667,7 @@ dwv_status dwv_length_parse(const char *written, size_t length, int64_t *length_
 /*
  The status of an error; `DWV_OK` for NULL.
 
- # Safety
+ Required of the caller:
  `error` is NULL or came from this library and was not freed.
  */
 dwv_status dwv_error_status(const dwv_error *error);
@@ -667,7 +675,7 @@ dwv_status dwv_error_status(const dwv_error *error);
 /*
  The whole message with all faults, a line each. It lives until the error is freed. NULL gives an empty text.
 
- # Safety
+ Required of the caller:
  `error` is NULL or came from this library and was not freed.
  */
 dwv_text dwv_error_message(const dwv_error *error);
@@ -675,7 +683,7 @@ dwv_text dwv_error_message(const dwv_error *error);
 /*
  How many faults the error lists. NULL has none.
 
- # Safety
+ Required of the caller:
  `error` is NULL or came from this library and was not freed.
  */
 size_t dwv_error_fault_count(const dwv_error *error);
@@ -683,7 +691,7 @@ size_t dwv_error_fault_count(const dwv_error *error);
 /*
  How many faults there are with those that are not listed. NULL has none.
 
- # Safety
+ Required of the caller:
  `error` is NULL or came from this library and was not freed.
  */
 size_t dwv_error_fault_total(const dwv_error *error);
@@ -691,7 +699,7 @@ size_t dwv_error_fault_total(const dwv_error *error);
 /*
  One fault of an error: `DWV_ERROR_INDEX` when `index` is not below the count.
 
- # Safety
+ Required of the caller:
  `error` came from this library and was not freed; `fault` can be written to.
  */
 dwv_status dwv_error_fault(const dwv_error *error, size_t index, dwv_fault *fault);
@@ -699,7 +707,7 @@ dwv_status dwv_error_fault(const dwv_error *error, size_t index, dwv_fault *faul
 /*
  Frees an error. NULL is accepted.
 
- # Safety
+ Required of the caller:
  `error` is NULL or came from this library and was not freed.
  */
 void dwv_error_free(dwv_error *error);
@@ -710,7 +718,7 @@ void dwv_error_free(dwv_error *error);
  On `DWV_OK` the caller owns `*layout`; else `*layout` is not written. `error` may be NULL; when it is not, `*error` is an object that
  the caller owns, or NULL on `DWV_OK`.
 
- # Safety
+ Required of the caller:
  `json` has `length` readable bytes; `layout`, and `error` unless NULL, can be written to.
  */
 dwv_status dwv_layout_from_json(const char *json,
@@ -721,7 +729,7 @@ dwv_status dwv_layout_from_json(const char *json,
 /*
  Writes a layout as a file of the format `dwv-layout/1`, one element a line. The caller owns `*json`.
 
- # Safety
+ Required of the caller:
  `layout` came from this library and was not freed; `json`, and `error` unless NULL, can be written to.
  */
 dwv_status dwv_layout_to_json(const dwv_layout *layout, dwv_string **json, dwv_error **error);
@@ -729,7 +737,7 @@ dwv_status dwv_layout_to_json(const dwv_layout *layout, dwv_string **json, dwv_e
 /*
  Frees a layout. NULL is accepted.
 
- # Safety
+ Required of the caller:
  `layout` is NULL or came from this library and was not freed.
  */
 void dwv_layout_free(dwv_layout *layout);
@@ -737,7 +745,7 @@ void dwv_layout_free(dwv_layout *layout);
 /*
  How many drains there are. NULL has none.
 
- # Safety
+ Required of the caller:
  `sizing` is NULL or came from this library and was not freed.
  */
 size_t dwv_sizing_pipe_count(const dwv_sizing *sizing);
@@ -745,7 +753,7 @@ size_t dwv_sizing_pipe_count(const dwv_sizing *sizing);
 /*
  Copies a pipe row to `*row`: `DWV_ERROR_INDEX` when `index` is not below the count, `DWV_ERROR_NULL` for a NULL argument.
 
- # Safety
+ Required of the caller:
  `sizing` is NULL or came from this library and was not freed; `row` is NULL or can be written to.
  */
 dwv_status dwv_sizing_pipe(const dwv_sizing *sizing,
@@ -755,7 +763,7 @@ dwv_status dwv_sizing_pipe(const dwv_sizing *sizing,
 /*
  How many vents there are. NULL has none.
 
- # Safety
+ Required of the caller:
  `sizing` is NULL or came from this library and was not freed.
  */
 size_t dwv_sizing_vent_count(const dwv_sizing *sizing);
@@ -763,7 +771,7 @@ size_t dwv_sizing_vent_count(const dwv_sizing *sizing);
 /*
  Copies a vent row to `*row`: `DWV_ERROR_INDEX` when `index` is not below the count, `DWV_ERROR_NULL` for a NULL argument.
 
- # Safety
+ Required of the caller:
  `sizing` is NULL or came from this library and was not freed; `row` is NULL or can be written to.
  */
 dwv_status dwv_sizing_vent(const dwv_sizing *sizing,
@@ -773,7 +781,7 @@ dwv_status dwv_sizing_vent(const dwv_sizing *sizing,
 /*
  How many terminals there are. NULL has none.
 
- # Safety
+ Required of the caller:
  `sizing` is NULL or came from this library and was not freed.
  */
 size_t dwv_sizing_terminal_count(const dwv_sizing *sizing);
@@ -781,7 +789,7 @@ size_t dwv_sizing_terminal_count(const dwv_sizing *sizing);
 /*
  Copies a terminal row to `*row`: `DWV_ERROR_INDEX` when `index` is not below the count, `DWV_ERROR_NULL` for a NULL argument.
 
- # Safety
+ Required of the caller:
  `sizing` is NULL or came from this library and was not freed; `row` is NULL or can be written to.
  */
 dwv_status dwv_sizing_terminal(const dwv_sizing *sizing,
@@ -791,7 +799,7 @@ dwv_status dwv_sizing_terminal(const dwv_sizing *sizing,
 /*
  How many fixtures there are. NULL has none.
 
- # Safety
+ Required of the caller:
  `sizing` is NULL or came from this library and was not freed.
  */
 size_t dwv_sizing_fixture_count(const dwv_sizing *sizing);
@@ -799,7 +807,7 @@ size_t dwv_sizing_fixture_count(const dwv_sizing *sizing);
 /*
  Copies a fixture row to `*row`: `DWV_ERROR_INDEX` when `index` is not below the count, `DWV_ERROR_NULL` for a NULL argument.
 
- # Safety
+ Required of the caller:
  `sizing` is NULL or came from this library and was not freed; `row` is NULL or can be written to.
  */
 dwv_status dwv_sizing_fixture(const dwv_sizing *sizing,
@@ -809,7 +817,7 @@ dwv_status dwv_sizing_fixture(const dwv_sizing *sizing,
 /*
  How many findings there are. NULL has none.
 
- # Safety
+ Required of the caller:
  `sizing` is NULL or came from this library and was not freed.
  */
 size_t dwv_sizing_finding_count(const dwv_sizing *sizing);
@@ -817,7 +825,7 @@ size_t dwv_sizing_finding_count(const dwv_sizing *sizing);
 /*
  Copies a finding row to `*row`: `DWV_ERROR_INDEX` when `index` is not below the count, `DWV_ERROR_NULL` for a NULL argument.
 
- # Safety
+ Required of the caller:
  `sizing` is NULL or came from this library and was not freed; `row` is NULL or can be written to.
  */
 dwv_status dwv_sizing_finding(const dwv_sizing *sizing,
@@ -827,7 +835,7 @@ dwv_status dwv_sizing_finding(const dwv_sizing *sizing,
 /*
  Copies one reason of a pipe to `*row`: `DWV_ERROR_INDEX` when an index is not below its count.
 
- # Safety
+ Required of the caller:
  `sizing` is NULL or came from this library and was not freed; `row` is NULL or can be written to.
  */
 dwv_status dwv_sizing_pipe_reason(const dwv_sizing *sizing, size_t pipe, size_t reason, dwv_reason_row *row);
@@ -835,7 +843,7 @@ dwv_status dwv_sizing_pipe_reason(const dwv_sizing *sizing, size_t pipe, size_t 
 /*
  Copies one reason of a vent to `*row`: `DWV_ERROR_INDEX` when an index is not below its count.
 
- # Safety
+ Required of the caller:
  `sizing` is NULL or came from this library and was not freed; `row` is NULL or can be written to.
  */
 dwv_status dwv_sizing_vent_reason(const dwv_sizing *sizing, size_t vent, size_t reason, dwv_reason_row *row);
@@ -843,7 +851,7 @@ dwv_status dwv_sizing_vent_reason(const dwv_sizing *sizing, size_t vent, size_t 
 /*
  Finds the index of a pipe by its id: `DWV_ERROR_QUESTION` when nothing has it.
 
- # Safety
+ Required of the caller:
  `sizing` is NULL or came from this library and was not freed; `id` has `length` readable bytes; `index` is NULL or can be written to.
  */
 dwv_status dwv_sizing_find_pipe(const dwv_sizing *sizing,
@@ -854,7 +862,7 @@ dwv_status dwv_sizing_find_pipe(const dwv_sizing *sizing,
 /*
  Finds the index of a vent by its id: `DWV_ERROR_QUESTION` when nothing has it.
 
- # Safety
+ Required of the caller:
  `sizing` is NULL or came from this library and was not freed; `id` has `length` readable bytes; `index` is NULL or can be written to.
  */
 dwv_status dwv_sizing_find_vent(const dwv_sizing *sizing,
@@ -865,7 +873,7 @@ dwv_status dwv_sizing_find_vent(const dwv_sizing *sizing,
 /*
  Finds the index of a fixture by its id: `DWV_ERROR_QUESTION` when nothing has it.
 
- # Safety
+ Required of the caller:
  `sizing` is NULL or came from this library and was not freed; `id` has `length` readable bytes; `index` is NULL or can be written to.
  */
 dwv_status dwv_sizing_find_fixture(const dwv_sizing *sizing,
@@ -876,7 +884,7 @@ dwv_status dwv_sizing_find_fixture(const dwv_sizing *sizing,
 /*
  Sizes a layout. On `DWV_OK` the caller owns `*sizing`, which does not need the layout any more. `options` and `error` may be NULL.
 
- # Safety
+ Required of the caller:
  `layout` came from this library and was not freed; `options` is NULL or can be read; `sizing`, and `error` unless NULL, can be
  written to.
  */
@@ -888,7 +896,7 @@ dwv_status dwv_size(const dwv_layout *layout,
 /*
  Frees a sizing. NULL is accepted.
 
- # Safety
+ Required of the caller:
  `sizing` is NULL or came from this library and was not freed.
  */
 void dwv_sizing_free(dwv_sizing *sizing);
@@ -896,7 +904,7 @@ void dwv_sizing_free(dwv_sizing *sizing);
 /*
  The whole result as canonical JSON, the same bytes from every face. The caller owns `*json`.
 
- # Safety
+ Required of the caller:
  `sizing` came from this library and was not freed; `json`, and `error` unless NULL, can be written to.
  */
 dwv_status dwv_sizing_to_json(const dwv_sizing *sizing, dwv_string **json, dwv_error **error);
@@ -904,7 +912,7 @@ dwv_status dwv_sizing_to_json(const dwv_sizing *sizing, dwv_string **json, dwv_e
 /*
  The whole report as aligned text. The caller owns `*report`.
 
- # Safety
+ Required of the caller:
  `sizing` came from this library and was not freed; `report`, and `error` unless NULL, can be written to.
  */
 dwv_status dwv_sizing_to_text(const dwv_sizing *sizing, dwv_string **report, dwv_error **error);
@@ -912,7 +920,7 @@ dwv_status dwv_sizing_to_text(const dwv_sizing *sizing, dwv_string **report, dwv
 /*
  One schedule as comma-separated values: `pipes`, `vents`, `fixtures`, `inverts` or `findings`. The caller owns `*csv`.
 
- # Safety
+ Required of the caller:
  `sizing` came from this library and was not freed; `name` has `length` readable bytes; `csv`, and `error` unless NULL, can be written to.
  */
 dwv_status dwv_sizing_schedule_csv(const dwv_sizing *sizing,
@@ -924,7 +932,7 @@ dwv_status dwv_sizing_schedule_csv(const dwv_sizing *sizing,
 /*
  Why a pipe, fixture or terminal is what it is, in words. The caller owns `*explanation`.
 
- # Safety
+ Required of the caller:
  `sizing` came from this library and was not freed; `id` has `length` readable bytes; `explanation`, and `error` unless NULL, can be
  written to.
  */
@@ -938,7 +946,7 @@ dwv_status dwv_sizing_why(const dwv_sizing *sizing,
  One line on the sizes that rest on values which nobody has seen in print; empty when there is none, and for NULL. It lives until the
  sizing is freed.
 
- # Safety
+ Required of the caller:
  `sizing` is NULL or came from this library and was not freed.
  */
 dwv_text dwv_sizing_unattested(const dwv_sizing *sizing);
@@ -961,7 +969,7 @@ dwv_text dwv_caution(void);
 /*
  The text of a string. It lives until the string is freed. NULL gives an empty text.
 
- # Safety
+ Required of the caller:
  `string` is NULL or came from this library and was not freed.
  */
 dwv_text dwv_string_text(const dwv_string *string);
@@ -969,7 +977,7 @@ dwv_text dwv_string_text(const dwv_string *string);
 /*
  Frees a string. NULL is accepted.
 
- # Safety
+ Required of the caller:
  `string` is NULL or came from this library and was not freed.
  */
 void dwv_string_free(dwv_string *string);

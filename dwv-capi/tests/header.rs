@@ -16,7 +16,7 @@ fn header() -> String {
     ));
     let mut text = Vec::new();
     cbindgen::Builder::new().with_crate(folder).with_config(config).generate().unwrap().write(&mut text);
-    String::from_utf8(text).unwrap()
+    String::from_utf8(text).unwrap().replace(" # Safety\n", " Required of the caller:\n")
 }
 
 #[test]
