@@ -34,7 +34,7 @@ bench:
 lint: $(VENV)/installed
 	cargo fmt --all --check
 	cargo clippy --workspace --all-targets --features dwv-core/schema -- -D warnings
-	$(BIN)/ruff check . && $(BIN)/ruff format --check . && $(BIN)/mypy --config-file dwv-py/pyproject.toml dwv-py/python python-examples dwv-py/tests
+	$(BIN)/ruff check --config dwv-py/pyproject.toml dwv-py python-examples && $(BIN)/ruff format --config dwv-py/pyproject.toml --check dwv-py python-examples && $(BIN)/mypy --config-file dwv-py/pyproject.toml dwv-py/python python-examples dwv-py/tests
 
 clean:
 	rm -rf target $(VENV) $(OUT)
