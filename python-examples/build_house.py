@@ -15,7 +15,7 @@ import dwv
 
 def draw() -> dwv.Layout:
     """Two storeys on a basement: three bathrooms, a powder room, a kitchen and a laundry."""
-    house = dwv.Layout.build("Alder, two storeys with basement", "npc-2015", frost_can_close_vents=True)
+    house = dwv.Layout.builder("Alder, two storeys with basement", "npc-2015", frost_can_close_vents=True)
     house.level("basement", "-2.7 m").level("main", "0 m").level("upper", "2.9 m").level("roof", "5.8 m")
     draw_upper_baths(house)
     draw_soil_stack(house)
@@ -24,7 +24,7 @@ def draw() -> dwv.Layout:
     draw_basement_bath(house)
     draw_building_drain(house)
     draw_vents(house)
-    return house.finish()
+    return house.build()
 
 
 def draw_upper_baths(house: dwv.LayoutBuilder) -> None:

@@ -10,7 +10,7 @@ import pytest
 def layout() -> dwv.Layout:
     """One kitchen sink with its vent, made up for the tests."""
     return (
-        dwv.Layout.build("one sink", frost_can_close_vents=True)
+        dwv.Layout.builder("one sink", frost_can_close_vents=True)
         .level("main", "0 m")
         .fixture("KS", "kitchen-sink", "main", height="0.45 m")
         .joint("J1", "main", height="0.4 m")
@@ -20,7 +20,7 @@ def layout() -> dwv.Layout:
         .vent("v1", "J1", "T1", length="6.1 m")
         .terminal("T1", above="300 mm")
         .sewer("S", invert="-1 m")
-        .finish()
+        .build()
     )
 
 

@@ -146,7 +146,7 @@ def test_a_lone_surrogate_is_refused() -> None:
     with pytest.raises(dwv.FormatError):
         dwv.Layout.from_dict(SINK | {"name": "\ud800"})
     with pytest.raises(dwv.FormatError):
-        dwv.Layout.build("\ud800").finish()
+        dwv.Layout.builder("\ud800").build()
 
 
 VALUES = st.recursive(

@@ -12,10 +12,10 @@ from dwv import _dwv
 
 
 def cycle() -> dwv.Sizing:
-    drawing = dwv.Layout.build("round and round").level("main", "0 m").fixture("KS", "kitchen-sink", "main")
+    drawing = dwv.Layout.builder("round and round").level("main", "0 m").fixture("KS", "kitchen-sink", "main")
     drawing.joint("J", "main").joint("K", "main").joint("S", "main")
     drawing.drain("d1", "KS", "J").drain("d2", "J", "K").drain("d3", "K", "J").sewer("S")
-    return dwv.size(drawing.finish())
+    return dwv.size(drawing.build())
 
 
 def ragged() -> str:
@@ -67,10 +67,10 @@ def test_a_panic_of_the_engine_is_an_exception_like_others(capfd: pytest.Capture
 
 
 def test_faults_name_element_and_path() -> None:
-    drawing = dwv.Layout.build("Heron").level("main", "0 m").fixture("KS", "kichen-sink", "main")
+    drawing = dwv.Layout.builder("Heron").level("main", "0 m").fixture("KS", "kichen-sink", "main")
     drawing.joint("S", "main").drain("d1", "KS", "T").sewer("S")
     with pytest.raises(dwv.DrawingError) as caught:
-        dwv.size(drawing.finish())
+        dwv.size(drawing.build())
     faults = {fault.path: fault for fault in caught.value.faults}
     assert faults["fixtures[0].kind"].element == "KS"
     assert faults["fixtures[0].kind"].help == "did you mean `kitchen-sink`?"
@@ -78,11 +78,11 @@ def test_faults_name_element_and_path() -> None:
 
 
 def test_many_faults_are_counted_and_the_first_hundred_listed() -> None:
-    drawing = dwv.Layout.build("Heron")
+    drawing = dwv.Layout.builder("Heron")
     for index in range(130):
         drawing.level(f"L{index}", "0 cubits")
     with pytest.raises(dwv.FormatError, match="and 31 more") as caught:
-        drawing.finish()
+        drawing.build()
     # One more: there is no sewer.
     assert (len(caught.value.faults), caught.value.total) == (100, 131)
     assert pickle.loads(pickle.dumps(caught.value)).total == 131

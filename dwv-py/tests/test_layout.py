@@ -79,7 +79,7 @@ def test_a_layout_shows_what_it_holds(layout: dwv.Layout) -> None:
 
 
 def test_everything_that_can_be_drawn_is_written_as_it_was_stated() -> None:
-    drawing = dwv.Layout.build(
+    drawing = dwv.Layout.builder(
         "all", units="mm", frost_can_close_vents=False, pipe_sizes=["2", 3, 1.5], building_drain_ends_at="J"
     )
     drawing.level("main", 0)
@@ -93,7 +93,7 @@ def test_everything_that_can_be_drawn_is_written_as_it_was_stated() -> None:
     drawing.terminal("T", through="wall", above="2 m", level="main", height="3 m", at=(0, 0))
     drawing.valve("A", grounds="island", level="main", height="1 m", at=(0, 0))
     drawing.cleanout("C", "J").sewer("S", invert="-2 m")
-    written = json.loads(drawing.finish().to_json())
+    written = json.loads(drawing.build().to_json())
     assert written == {
         "format": "dwv-layout/1",
         "name": "all",
@@ -160,17 +160,17 @@ def test_the_schema_knows_what_can_be_drawn(layout: dwv.Layout) -> None:
 
 
 def test_drawing_goes_on_after_it_was_finished_once() -> None:
-    drawing = dwv.Layout.build("Heron").level("main", "0 m").joint("S", "main").sewer("S")
-    first = drawing.finish()
-    second = drawing.joint("J", "main").finish()
+    drawing = dwv.Layout.builder("Heron").level("main", "0 m").joint("S", "main").sewer("S")
+    first = drawing.build()
+    second = drawing.joint("J", "main").build()
     assert first != second
     assert '"J"' not in first.to_json()
 
 
 def test_all_faults_of_a_drawing_are_told_together() -> None:
-    drawing = dwv.Layout.build("Heron").level("main", "0 cubits")
+    drawing = dwv.Layout.builder("Heron").level("main", "0 cubits")
     drawing.fixture("KS", "kitchen-sink", "main", trap="1-3/8").drain("d1", "KS", "S", slope="steep").sewer("S")
     with pytest.raises(dwv.FormatError) as caught:
-        drawing.finish()
+        drawing.build()
     assert [fault.path for fault in caught.value.faults] == ["levels[0].floor", "fixtures[0].trap", "drains[0].slope"]
     assert caught.value.total == 3

@@ -29,13 +29,13 @@ VentName = Literal[
 
 
 class LayoutBuilder:
-    r"""Gathers the elements of a layout; begun by `Layout.build`.
+    r"""Gathers the elements of a layout; begun by `Layout.builder`.
 
-    Every method adds one element and returns the builder. Nothing is judged before `finish()`, which then tells all
+    Every method adds one element and returns the builder. Nothing is judged before `build()`, which then tells all
     faults at once, each with its path.
 
     >>> drawing = (
-    ...     Layout.build("Heron, kitchen", frost_can_close_vents=True)
+    ...     Layout.builder("Heron, kitchen", frost_can_close_vents=True)
     ...     .level("main", "0 m")
     ...     .fixture("KS", "kitchen-sink", "main", height="450 mm")
     ...     .joint("J1", "main", height="0.4 m")
@@ -45,7 +45,7 @@ class LayoutBuilder:
     ...     .vent("v1", "J1", "T1", length="6.1 m")
     ...     .terminal("T1", above="300 mm")
     ...     .sewer("S", invert="-1 m")
-    ...     .finish()
+    ...     .build()
     ... )
     >>> drawing.name
     'Heron, kitchen'
@@ -63,7 +63,7 @@ class LayoutBuilder:
         pipe_sizes: Iterable[Size] | None = None,
         building_drain_ends_at: str | None = None,
     ) -> None:
-        """Begins a layout; see `Layout.build`."""
+        """Begins a layout; see `Layout.builder`."""
         stated = {
             "format": "dwv-layout/1",
             "name": name,
@@ -281,7 +281,7 @@ class LayoutBuilder:
         self._drawing["sewer"] = _stated({"at": at, "invert": invert})
         return self
 
-    def finish(self) -> Layout:
+    def build(self) -> Layout:
         """The layout as drawn so far.
 
         Raises:

@@ -79,7 +79,7 @@ class Layout(_dwv.Layout):
         return cls.from_json(json_text(drawing, FormatError))
 
     @classmethod
-    def build(
+    def builder(
         cls,
         name: str,
         edition: str = "npc-2015",
@@ -89,7 +89,7 @@ class Layout(_dwv.Layout):
         pipe_sizes: Iterable[str | float] | None = None,
         building_drain_ends_at: str | None = None,
     ) -> LayoutBuilder:
-        """Begins a layout, to be drawn element by element and finished by `finish()`.
+        """Begins a layout, to be drawn element by element and finished by `build()`.
 
         Args:
             name: What the drawing is called in schedules.
