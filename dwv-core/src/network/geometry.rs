@@ -114,6 +114,11 @@ impl DrainEnds<'_> {
         }
     }
 
+    /// An end that is not there is told elsewhere, and nothing follows from its height.
+    fn ends_known(&self) -> bool {
+        self.from.elevation.is_some() && self.to.elevation.is_some()
+    }
+
     fn fault(&self, code: FaultCode, key: &str, message: String) -> Fault {
         Fault::new(code, format!("drains[{}].{key}", self.path), message).of(&self.drain.id)
     }
@@ -132,8 +137,30 @@ impl DrainEnds<'_> {
             faults.push(self.fault(FaultCode::Contradiction, "drop", message).help(help));
         }
         self.check_reach(length, plan, faults);
+        self.check_level(length.or(plan), top, foot, faults);
         let slope = self.drain.slope.map(|slope| slope.value);
         Run { length: length.or(plan), drop: None, slope, vertical: false, top, foot: foot.min(top) }
+    }
+
+    /// A drain that is drawn level although its ends are at quite different heights. The grade itself is not drawn.
+    fn check_level(&self, length: Option<Length>, top: Length, end: Length, faults: &mut Faults) {
+        let heights_stated = self.from.height_stated && self.to.height_stated;
+        if !self.ends_known() || (!heights_stated && self.from.storey == self.to.storey) {
+            return;
+        }
+        let ends = || {
+            let (top, end) = (top.rounded(LengthUnit::Metre), end.rounded(LengthUnit::Metre));
+            format!("`{}` at {top} and `{}` at {end}", self.drain.from, self.drain.to)
+        };
+        if end - top > limits::DRAWING_TOLERANCE {
+            let message = format!("a drain does not go up, but it is drawn from {}", ends().replace(" and ", " to "));
+            let help = "swap `from` and `to`, or correct the heights of the two";
+            faults.push(self.fault(FaultCode::GoesUp, "to", message).help(help));
+        } else if top - end > length.unwrap_or(limits::LEVEL_DROP) {
+            let message = format!("it is drawn level, but it drops farther than it is long, between {}", ends());
+            let help = "say `\"runs\": \"vertical\"` or `\"sloped\"`, or correct the heights of the two";
+            faults.push(self.fault(FaultCode::Contradiction, "runs", message).help(help));
+        }
     }
 
     /// A stated length that is shorter than the way between the ends on the plan.
@@ -168,7 +195,7 @@ impl DrainEnds<'_> {
         let drawn = top - end;
         let stated = drop.or(length);
         let heights_stated = self.from.height_stated && self.to.height_stated;
-        if drawn.is_negative() || (stated.is_none() && drawn == Length::ZERO) {
+        if self.ends_known() && (drawn.is_negative() || (stated.is_none() && drawn == Length::ZERO)) {
             let message = format!(
                 "a vertical drain goes down, but `{}` at {} is not below `{}` at {}",
                 self.drain.to,
