@@ -443,6 +443,10 @@ typedef struct {
    */
   dwv_text load_clause;
   /*
+   How sure the load is: `printed-two` … `unsure`; empty when the drawing states it.
+   */
+  dwv_text load_witness;
+  /*
    The developed length of the trap arm.
    */
   dwv_measure trap_arm;

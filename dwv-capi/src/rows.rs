@@ -186,6 +186,8 @@ pub struct dwv_fixture_row {
     pub load_thousandths: u64,
     /// Where the load comes from.
     pub load_clause: dwv_text,
+    /// How sure the load is: `printed-two` … `unsure`; empty when the drawing states it.
+    pub load_witness: dwv_text,
     /// The developed length of the trap arm.
     pub trap_arm: dwv_measure,
     /// How far the trap arm falls.

@@ -135,6 +135,7 @@ impl Rows {
                 outlet_length: measure(row.outlet_length),
                 load_thousandths: row.load.thousandths(),
                 load_clause: self.texts.add(&row.load_clause),
+                load_witness: self.texts.add(row.load_witness.map_or("", |witness| witness.name())),
                 trap_arm: measure(row.trap_arm_length),
                 trap_arm_fall: measure(row.trap_arm_fall),
                 protected_by: self.texts.add(row.protected_by.as_deref().unwrap_or_default()),

@@ -5,6 +5,7 @@ use serde::Serialize;
 use super::pipe_rows::metres;
 use crate::Sizing;
 use crate::checking::{Arm, is_exempt_from_vent};
+use crate::edition::Witness;
 use crate::network::{FixtureId, LoadSource, VentEnd};
 use crate::quantity::{FixtureUnits, Length, PipeSize};
 
@@ -30,6 +31,8 @@ pub struct FixtureRow {
     pub load: FixtureUnits,
     /// Where the load comes from.
     pub load_clause: String,
+    /// How sure the load is; none when the drawing states it.
+    pub load_witness: Option<Witness>,
     /// Only provided for.
     pub future: bool,
     /// The developed length of the trap arm; none when no air reaches it or a length is missing. In metres in JSON.
@@ -65,6 +68,8 @@ impl Sizing {
             LoadSource::Stated => "as stated in the drawing".to_owned(),
             _ => self.clause(load.citation),
         };
+        let stated = fixtures.load_source[index] == LoadSource::Stated;
+        let load_witness = (!stated).then(|| self.edition.citation(load.citation).witness);
         let kind = fixtures.kind[index];
         FixtureRow {
             id: fixtures.id[index].to_string(),
@@ -79,6 +84,7 @@ impl Sizing {
             outlet_length: fixtures.outlet_length[index],
             load: load.value,
             load_clause,
+            load_witness,
             future: fixtures.future[index],
             trap_arm_length: arm.filter(|arm| !arm.length_missing).map(|arm| arm.length),
             trap_arm_fall: arm.filter(|arm| !arm.length_missing).map(|arm| arm.fall),

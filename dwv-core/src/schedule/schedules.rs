@@ -2,6 +2,7 @@
 
 use super::{Status, Table};
 use crate::Sizing;
+use crate::edition::Witness;
 use crate::error::{Error, ErrorKind, Fault, FaultCode, nearest};
 use crate::quantity::{Length, LengthUnit, PipeSize};
 
@@ -167,7 +168,7 @@ impl Sizing {
                 row.outlet.map_or_else(|| "-".to_owned(), |outlet| outlet.to_string()),
                 row.trap.to_string(),
                 row.load.to_string(),
-                row.load_clause,
+                with_witness(row.load_clause, row.load_witness),
                 self.number(row.trap_arm_length),
                 self.number(row.trap_arm_fall),
                 row.air,
@@ -283,6 +284,14 @@ impl Sizing {
 
 fn size(size: Option<PipeSize>) -> String {
     size.map_or_else(|| "cannot decide".to_owned(), |size| size.to_string())
+}
+
+/// A clause, with a word on how sure its value is when nobody here has seen it in print.
+fn with_witness(clause: String, witness: Option<Witness>) -> String {
+    match witness.filter(|witness| !witness.is_attested()) {
+        Some(witness) => format!("{clause} [{}]", witness.words()),
+        None => clause,
+    }
 }
 
 fn note(status: Status) -> String {

@@ -166,7 +166,9 @@ impl Sizing {
     fn why_fixture(&self, fixture: FixtureId) -> String {
         let row = &self.fixture_row(fixture);
         let mut text = format!("`{}`, {} on `{}`\n", row.id, row.kind, row.level);
-        line(&mut text, &format!("load: {} FU ({})", row.load, row.load_clause));
+        let sure = row.load_witness.filter(|witness| !witness.is_attested());
+        let sure = sure.map_or_else(String::new, |witness| format!(" [{}]", witness.words()));
+        line(&mut text, &format!("load: {} FU ({}){sure}", row.load, row.load_clause));
         if let Some(outlet) = row.outlet {
             let length = row.outlet_length.map(|length| format!(", {} long", length.rounded(self.network.length_unit)));
             line(&mut text, &format!("fixture outlet pipe: at least {outlet} in{}", length.unwrap_or_default()));

@@ -165,6 +165,8 @@ class FixtureRow:
     """Its load in fixture units."""
     load_clause: str
     """Where the load comes from."""
+    load_witness: Witness | None
+    """How sure the load is; none when the drawing states it."""
     future: bool
     """Only provided for; it counts all the same."""
     trap_arm_m: float | None
