@@ -35,7 +35,9 @@ fn words(case: &Case<'_>, finding: &Finding) -> String {
     let ids: Vec<String> =
         unsure(case).take(SHOWN).map(|vent| format!("`{}`", case.operands.network.vents.id[vent])).collect();
     let more = if finding.found as usize > SHOWN { " …" } else { "" };
-    let sizes = if finding.found == 1 { "the size of 1 vent is" } else { "the sizes of {} vents are" };
-    let sizes = sizes.replace("{}", &finding.found.to_string());
-    format!("{sizes} provisional, for their table is known from memory only: {}{more}", ids.join(", "))
+    let sizes = match finding.found {
+        1 => "the size of 1 vent is provisional, for its table".to_owned(),
+        count => format!("the sizes of {count} vents are provisional, for their table"),
+    };
+    format!("{sizes} is known from memory only: {}{more}", ids.join(", "))
 }

@@ -71,7 +71,7 @@ impl Names {
         refill(&mut self.long_offset, count, false);
         self.stacks.clear();
         self.scratch.follow_lines(network);
-        self.scratch.group_runs(network, edition);
+        self.scratch.group_runs(network, edition, loads);
         let scratch = &mut self.scratch;
         scratch.stack_of_group.clear();
         for group in &scratch.groups {
@@ -172,8 +172,9 @@ impl Scratch {
         });
     }
 
-    /// Puts the runs of one line together: two that each pass a storey, or two that pass one only together by a short offset.
-    fn group_runs(&mut self, network: &Network, edition: &Edition) {
+    /// Puts the runs of one line together: two that each pass a storey, or two that pass one only together, by a short offset or by
+    /// one that nothing else drains into.
+    fn group_runs(&mut self, network: &Network, edition: &Edition, loads: &Loads) {
         let allowance = edition.rules.storey_allowance.value;
         self.floors.clear();
         self.floors.extend(network.levels.iter().map(|LevelRow { floor, .. }| *floor));
@@ -187,7 +188,9 @@ impl Scratch {
                 let Group { top, storeys, .. } = self.groups[group];
                 let together = storeys_passed(&self.floors, allowance, top, run.foot);
                 let short = length.is_some_and(|length| length < edition.rules.stack_offset.value);
-                let joined = (storeys > 0 && own > 0) || (short && together > storeys + own);
+                let traps = |pipe: DrainId| loads.traps[pipe.index()];
+                let alone = run.stretch.is_some_and(|last| traps(last) == traps(self.runs[above].last));
+                let joined = (storeys > 0 && own > 0) || ((short || alone) && together > storeys + own);
                 joined.then_some((group, together.max(storeys + own)))
             });
             self.runs[index].group = match group {

@@ -148,18 +148,19 @@ impl Sizing {
 
     pub(crate) fn drain_status(&self, index: usize) -> Status {
         let beyond = self.columns.sizes.drain_beyond.binary_search(&DrainId::new(index)).is_ok();
-        self.status(&self.columns.sizes.drain_reasons, index, false, beyond)
+        self.status(self.columns.sizes.drain_reasons.of(index), self.columns.sizes.drain_sure[index], beyond)
     }
 
     pub(crate) fn vent_status(&self, index: usize) -> Status {
         let loads = &self.columns.vent_loads;
         let missing = loads.length_missing[index] && VentLoads::length_counts(self.columns.names.vent[index].name);
         let beyond = self.columns.sizes.vent_beyond.binary_search(&VentId::new(index)).is_ok();
-        self.status(&self.columns.sizes.vent_reasons, index, missing, beyond)
+        self.status(self.columns.sizes.vent_reasons.of(index), self.columns.sizes.vent_sure[index], missing || beyond)
     }
 
     fn terminal_status(&self, index: usize) -> Status {
-        let own = self.status(&self.columns.sizes.terminal_reasons, index, false, false);
+        let own =
+            self.status(self.columns.sizes.terminal_reasons.of(index), self.columns.sizes.terminal_sure[index], false);
         let vent = self.vent_status(self.network.terminals[index].vent.index());
         match (own, vent) {
             (Status::CannotDecide, _) | (_, Status::CannotDecide) => Status::CannotDecide,

@@ -6,7 +6,7 @@ use crate::Sizing;
 use crate::edition::Witness;
 use crate::explain::{rule_name, says};
 use crate::quantity::PipeSize;
-use crate::sizing::{Reasons, Rule};
+use crate::sizing::{Reason, Reasons, Rule};
 use crate::sizing_run::Unattested;
 
 /// How far a size is decided.
@@ -55,7 +55,7 @@ pub struct ReasonRow {
 impl Sizing {
     pub(super) fn reason_rows(&self, reasons: &Reasons, index: usize) -> Vec<ReasonRow> {
         let governing = reasons.governing(index);
-        let row = |reason: &crate::sizing::Reason| {
+        let row = |reason: &Reason| {
             let citation = self.edition.citation(reason.citation);
             ReasonRow {
                 rule: rule_name(reason.rule),
@@ -69,16 +69,14 @@ impl Sizing {
         reasons.of(index).iter().map(row).collect()
     }
 
-    /// Whether a size is decided, by its reasons and by whether something that they need is missing.
-    pub(super) fn status(&self, reasons: &Reasons, index: usize, missing: bool, beyond: bool) -> Status {
-        let attested = |citation| self.edition.citation(citation).witness.is_attested();
-        let governed = reasons.governing(index).is_none_or(|reason| attested(reason.citation));
-        let certain = !reasons
-            .of(index)
-            .iter()
-            .any(|reason| matches!(reason.rule, Rule::VentLength) && !attested(reason.citation));
-        let sure = governed && certain;
-        if beyond || missing || (!sure && self.unattested == Unattested::Refuse) {
+    /// Whether a size is decided: by whether it is sure, and whether something that it needs is missing.
+    pub(super) fn status(&self, reasons: &[Reason], sure: bool, missing: bool) -> Status {
+        // A table that nobody here has seen in print could ask for more than it is remembered to.
+        let certain = !reasons.iter().any(|reason| {
+            reason.rule == Rule::VentLength && !self.edition.citation(reason.citation).witness.is_attested()
+        });
+        let sure = sure && certain;
+        if missing || (!sure && self.unattested == Unattested::Refuse) {
             Status::CannotDecide
         } else if sure {
             Status::Decided

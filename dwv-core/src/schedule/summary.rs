@@ -1,11 +1,14 @@
 //! The head of every report.
 
+use std::collections::BTreeSet;
+
 use serde::Serialize;
 
-use super::{CAUTION, Status};
+use super::CAUTION;
 use crate::Sizing;
 use crate::edition::{BuildingDrainEnd, UndergroundDrain, VentLengthReading};
 use crate::quantity::FixtureUnits;
+use crate::sizing::{Reason, Rule};
 
 /// What was sized, by which edition and readings, and how sure it is.
 #[derive(Debug, Clone, PartialEq, Eq, Serialize)]
@@ -84,34 +87,38 @@ impl Sizing {
 
     /// `3 sizes rest on values that nobody here has seen in print: d1, v2, T1 (Table 2.5.8.4.)`
     fn unattested_line(&self) -> Option<String> {
-        let drains = self.pipes().into_iter().map(|row| (row.id, row.status, row.reasons));
-        let vents = self.vents().into_iter().map(|row| (row.id, row.status, row.reasons));
-        let ends = self.terminals().into_iter().map(|row| (row.id, row.status, row.reasons));
-        let mut ids = Vec::new();
-        let mut clauses: Vec<String> = Vec::new();
-        for (id, status, reasons) in drains.chain(vents).chain(ends) {
-            if status == Status::Decided {
+        let sizes = &self.columns.sizes;
+        let network = &self.network;
+        let drains = (0..network.drains.len()).rev().map(|index| {
+            (&network.drains.id[index], sizes.drain_sure[index], sizes.drain[index], sizes.drain_reasons.of(index))
+        });
+        let vents = (0..network.vents.len()).rev().map(|index| {
+            (&network.vents.id[index], sizes.vent_sure[index], sizes.vent[index], sizes.vent_reasons.of(index))
+        });
+        let mut terminals: Vec<usize> = (0..network.terminals.len()).collect();
+        terminals.sort_by_key(|index| &network.terminals[*index].id);
+        let ends = terminals.into_iter().map(|index| {
+            let reasons = sizes.terminal_reasons.of(index);
+            (&network.terminals[index].id, sizes.terminal_sure[index], sizes.terminal[index], reasons)
+        });
+        let mut ids: Vec<&str> = Vec::new();
+        let mut clauses: BTreeSet<String> = BTreeSet::new();
+        for (id, sure, size, reasons) in drains.chain(vents).chain(ends) {
+            let attested = |reason: &Reason| self.edition.citation(reason.citation).witness.is_attested();
+            let uncertain = reasons.iter().any(|reason| reason.rule == Rule::VentLength && !attested(reason));
+            if sure && !uncertain {
                 continue;
             }
-            let unsure = reasons
-                .iter()
-                .filter(|reason| !reason.witness.is_attested() && (reason.governs || reason.rule == "vent-length"));
-            let mut any = false;
-            for reason in unsure {
-                any = true;
-                if !clauses.contains(&reason.clause) {
-                    clauses.push(reason.clause.clone());
-                }
-            }
-            if any {
-                ids.push(id);
-            }
+            ids.push(id);
+            let bearing =
+                |reason: &&Reason| !attested(reason) && (reason.asks == size || reason.rule == Rule::VentLength);
+            clauses.extend(reasons.iter().filter(bearing).map(|reason| self.clause(reason.citation)));
         }
         if ids.is_empty() {
             return None;
         }
-        clauses.sort();
         let sizes = if ids.len() == 1 { "1 size rests".to_owned() } else { format!("{} sizes rest", ids.len()) };
+        let clauses: Vec<String> = clauses.into_iter().collect();
         Some(format!(
             "{sizes} on values that nobody here has seen in print: {} ({})",
             ids.join(", "),

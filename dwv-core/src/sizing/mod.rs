@@ -59,6 +59,12 @@ pub struct Sizes {
     pub terminal_reasons: Reasons,
     /// The vent that gives the building drain its 3 in to open air, when a stack vent can.
     pub large_vent: Option<VentId>,
+    /// Whether the size of each drain rests on values that were seen in print, also where it is passed on from other pipes.
+    pub drain_sure: Vec<bool>,
+    /// The same for vents.
+    pub vent_sure: Vec<bool>,
+    /// The same for terminals.
+    pub terminal_sure: Vec<bool>,
     /// How many rounds it took.
     pub rounds: u32,
     /// The size of each drain before vents have asked for more: stack vents are sized for a stack of that size. The table of
@@ -87,5 +93,40 @@ impl Sizes {
         }
         self.measure_room(operands);
         self.size_terminals(operands, least);
+        self.find_sure_sizes(operands.edition);
+    }
+
+    /// A size is sure when a reason that asks for it was seen in print or passes on a sure size.
+    fn find_sure_sizes(&mut self, edition: &Edition) {
+        let attested = |reason: &Reason| edition.citation(reason.citation).witness.is_attested();
+        refill(&mut self.vent_sure, self.vent.len(), false);
+        for index in 0..self.vent.len() {
+            let size = self.vent[index];
+            let reasons = self.vent_reasons.of(index);
+            let sure = |reason: &Reason| match reason.rule {
+                Rule::JoinedVent => self.vent_sure[reason.other as usize],
+                _ => attested(reason),
+            };
+            self.vent_sure[index] =
+                reasons.is_empty() || reasons.iter().any(|reason| reason.asks == size && sure(reason));
+        }
+        refill(&mut self.drain_sure, self.drain.len(), false);
+        for index in 0..self.drain.len() {
+            let size = self.drain[index];
+            let sure = |reason: &Reason| match reason.rule {
+                Rule::Upstream => self.drain_sure[reason.other as usize],
+                Rule::ConnectedVent => self.vent_sure[reason.other as usize],
+                _ => attested(reason),
+            };
+            self.drain_sure[index] =
+                self.drain_reasons.of(index).iter().any(|reason| reason.asks == size && sure(reason));
+        }
+        self.terminal_sure.clear();
+        for index in 0..self.terminal.len() {
+            // One size larger than an unsure size is unsure too.
+            let vent =
+                self.terminal_reasons.of(index).first().is_none_or(|reason| self.vent_sure[reason.other as usize]);
+            self.terminal_sure.push(vent);
+        }
     }
 }

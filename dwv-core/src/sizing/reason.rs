@@ -1,6 +1,6 @@
 //! Why a pipe has its size: every minimum that the edition sets for it.
 
-use crate::edition::{CitationId, Edition};
+use crate::edition::{CitationId, Edition, Witness};
 use crate::quantity::PipeSize;
 
 /// The rule that sets a minimum.
@@ -124,21 +124,38 @@ impl Reasons {
     }
 }
 
-/// The largest reason of a range, and of equal ones the best attested.
+impl Reason {
+    /// Whether it only passes on the size of another pipe.
+    #[must_use]
+    pub fn is_passed_on(&self) -> bool {
+        matches!(self.rule, Rule::Upstream | Rule::ConnectedVent | Rule::JoinedVent | Rule::AtTerminal)
+    }
+
+    /// Of reasons that ask for one size, the lowest rank is shown: one that stands by itself and was seen in print, then one that passes
+    /// on the size of another pipe, then one that nobody here has seen in print.
+    fn rank(&self, edition: &Edition) -> (u8, Witness) {
+        let witness = edition.citation(self.citation).witness;
+        let order = if self.is_passed_on() {
+            1
+        } else if witness.is_attested() {
+            0
+        } else {
+            2
+        };
+        (order, witness)
+    }
+}
+
+/// The largest reason of a range, and of equal ones that of the lowest rank.
 fn govern(edition: &Edition, list: &[Reason], range: std::ops::Range<usize>) -> usize {
     let mut governing = range.start;
     for at in range.skip(1) {
         let (best, next) = (list[governing], list[at]);
-        let better = || witness(edition, next.citation) < witness(edition, best.citation);
-        if next.asks > best.asks || (next.asks == best.asks && better()) {
+        if next.asks > best.asks || (next.asks == best.asks && next.rank(edition) < best.rank(edition)) {
             governing = at;
         }
     }
     governing
-}
-
-fn witness(edition: &Edition, citation: CitationId) -> crate::edition::Witness {
-    edition.citation(citation).witness
 }
 
 #[cfg(test)]
