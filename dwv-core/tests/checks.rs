@@ -181,6 +181,12 @@ fn trap_arms(seen: &mut Seen) {
 fn pipes(seen: &mut Seen) {
     let slope = |text: &str| with(|layout| drain(layout, "a").slope = Some(Slope::parse(text).unwrap()));
     seen.pair("slope-below-minimum", slope("1:51"), &["slope-below-minimum a"], slope("1:50"));
+    // 7 FU need 4 in at 1:100; flatter, 4 in is not permitted and 8 in is the first that may lie at 1:200.
+    let sewer = |text: &str| with(|layout| drain(layout, "bs").slope = Some(Slope::parse(text).unwrap()));
+    let expected = ["flat-slope-enlarges-pipe bs"];
+    seen.pair("flat-slope-enlarges-pipe", sewer("1:200"), &expected, sewer("1:100"));
+    let invert = |stated: Option<Measure>| with(|layout| layout.sewer.invert = stated);
+    seen.pair("sewer-invert-missing", invert(None), &["sewer-invert-missing"], invert(length("-4 m")));
     let drawn = |text: &str| with(|layout| drain(layout, "bd").size = size(text));
     seen.pair("drawn-size-too-small", drawn("2"), &["drawn-size-too-small bd"], drawn("3"));
     // A branch of 12 in takes 3900 FU; the stack, the building drain and the sewer take 3902.5 and 3906.5 FU.

@@ -31,7 +31,12 @@ fn measure(text: &str) -> Measure {
 /// What is changed, and the faults that must be told: code, path, a few words of the message or of the help.
 type Broken = (&'static str, fn(&mut Layout), &'static [(&'static str, &'static str, &'static str)]);
 
-const BROKEN: [Broken; 30] = [
+const BROKEN: [Broken; 31] = [
+    (
+        "a vent shorter than its rise",
+        |it| it.vents[0].length = Some(measure("1 m")),
+        &[("contradiction", "vents[0].length", "shorter than the 1.780 m")],
+    ),
     (
         "an unknown joint",
         |it| drain(it, "a").to = "UU".into(),

@@ -5,11 +5,13 @@
 
 mod bathroom_group_incomplete;
 mod drawn_size_too_small;
+mod flat_slope_enlarges_pipe;
 mod frost_not_stated;
 mod length_missing;
 mod load_beyond_table;
 mod no_open_air_vent;
 mod outlet_pipe_too_long;
+mod sewer_invert_missing;
 mod siphonic_arm_too_far;
 mod slope_below_minimum;
 mod stack_without_stack_vent;
@@ -118,7 +120,7 @@ pub struct Check {
 }
 
 /// Every check, in the order of their reports.
-pub const CHECKS: [Check; 27] = [
+pub const CHECKS: [Check; 29] = [
     trap_without_vent::CHECK,
     trap_arm_too_long::CHECK,
     trap_arm_too_short::CHECK,
@@ -128,6 +130,7 @@ pub const CHECKS: [Check; 27] = [
     siphonic_arm_too_far::CHECK,
     outlet_pipe_too_long::CHECK,
     slope_below_minimum::CHECK,
+    flat_slope_enlarges_pipe::CHECK,
     drawn_size_too_small::CHECK,
     load_beyond_table::CHECK,
     wet_vent_too_many_closets::CHECK,
@@ -142,6 +145,7 @@ pub const CHECKS: [Check; 27] = [
     terminal_too_low::CHECK,
     terminal_height_missing::CHECK,
     length_missing::CHECK,
+    sewer_invert_missing::CHECK,
     vent_table_not_in_print::CHECK,
     bathroom_group_incomplete::CHECK,
     stated_name_contradicted::CHECK,

@@ -46,5 +46,5 @@ pub const LONGEST_ID: usize = 64;
 pub const MOST_LOAD_THOUSANDTHS: u64 = 10_000_000;
 /// How far a stated length or drop may fall short of what positions give before it is a contradiction.
 pub const DRAWING_TOLERANCE: Length = Length::from_millimetres(5);
-/// How far a level drain of unknown length may drop on the drawing before it is a contradiction.
-pub const LEVEL_DROP: Length = Length::from_millimetres(1000);
+/// How far a short level drain may drop on the drawing before it is a contradiction; a longer one as far as it is long.
+pub const LEVEL_DROP: Length = Length::from_millimetres(300);

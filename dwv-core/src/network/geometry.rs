@@ -156,7 +156,7 @@ impl DrainEnds<'_> {
             let message = format!("a drain does not go up, but it is drawn from {}", ends().replace(" and ", " to "));
             let help = "swap `from` and `to`, or correct the heights of the two";
             faults.push(self.fault(FaultCode::GoesUp, "to", message).help(help));
-        } else if top - end > length.unwrap_or(limits::LEVEL_DROP) {
+        } else if top - end > length.unwrap_or(limits::LEVEL_DROP).max(limits::LEVEL_DROP) {
             let message = format!("it is drawn level, but it drops farther than it is long, between {}", ends());
             let help = "say `\"runs\": \"vertical\"` or `\"sloped\"`, or correct the heights of the two";
             faults.push(self.fault(FaultCode::Contradiction, "runs", message).help(help));
@@ -301,18 +301,19 @@ pub(super) fn vent_length(
     let stated = reader.read(vent.length, &limits::PIPE_LENGTH, || format!("{path}.length"), faults);
     let plan = plan_distance(from, to);
     let rise = from.elevation.zip(to.elevation).map(|(from, to)| (to - from).abs());
-    if let (Some(stated), Some(plan)) = (stated, plan) {
-        let straight = hypotenuse(plan, rise.unwrap_or(Length::ZERO));
-        if stated + limits::DRAWING_TOLERANCE < plan {
-            let message = format!(
-                "the stated length {} is shorter than the {} between its ends",
-                stated.rounded(LengthUnit::Metre),
-                straight.rounded(LengthUnit::Metre)
-            );
-            let help = "leave `length` out to take it from the positions, or correct one of them";
-            let fault = Fault::new(FaultCode::Contradiction, format!("{path}.length"), message);
-            faults.push(fault.of(&vent.id).help(help));
-        }
+    let drawn_rise = rise.filter(|_| from.height_stated && to.height_stated).unwrap_or(Length::ZERO);
+    let straight = hypotenuse(plan.unwrap_or(Length::ZERO), drawn_rise);
+    if let Some(stated) = stated
+        && stated + limits::DRAWING_TOLERANCE < straight
+    {
+        let message = format!(
+            "the stated length {} is shorter than the {} between its ends",
+            stated.rounded(LengthUnit::Metre),
+            straight.rounded(LengthUnit::Metre)
+        );
+        let help = "leave `length` out to take it from positions and heights, or correct one of them";
+        let fault = Fault::new(FaultCode::Contradiction, format!("{path}.length"), message);
+        faults.push(fault.of(&vent.id).help(help));
     }
     stated.or_else(|| Some(plan? + rise?))
 }

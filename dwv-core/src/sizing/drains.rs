@@ -206,6 +206,15 @@ fn building_drain_size(operands: &Operands<'_>, index: usize) -> Option<TableSiz
     })
 }
 
+/// The size that the table of building drains asks for when each size lies at its least slope.
+pub(crate) fn building_drain_size_at_least_slope(operands: &Operands<'_>, index: usize) -> Option<PipeSize> {
+    let load = operands.loads.load[index];
+    operands.network.pipe_sizes.iter().find(|size| {
+        let slope = operands.edition.least_slope(*size).value;
+        operands.edition.building_drain.capacity(*size, slope).is_some_and(|capacity| capacity.value >= load)
+    })
+}
+
 fn room(operands: &Operands<'_>, index: usize, size: PipeSize) -> Option<FixtureUnits> {
     let Operands { network: _, edition, names, loads, stack_loads, wet_loads, .. } = *operands;
     let load = loads.load[index];

@@ -8,7 +8,7 @@ mod reason;
 mod terminals;
 mod vents;
 
-pub(crate) use drains::slope_at;
+pub(crate) use drains::{building_drain_size_at_least_slope, slope_at};
 pub use reason::{Reason, Reasons, Rule};
 
 use crate::edition::Edition;
