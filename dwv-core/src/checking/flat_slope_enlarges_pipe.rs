@@ -19,8 +19,9 @@ fn run(case: &Case<'_>, report: &mut Report<'_>) {
     let drains = &case.operands.network.drains;
     for index in (0..drains.len()).filter(|index| drains.slope[*index].is_some()) {
         let size = case.sizes.drain[index];
-        let by_table = case.sizes.drain_reasons.of(index).iter().find(|reason| reason.rule == Rule::BuildingDrainTable);
-        let grown = by_table.is_some_and(|reason| reason.asks == size);
+        // Only where nothing but the table asks for the size.
+        let mut asks = case.sizes.drain_reasons.of(index).iter().filter(|reason| reason.asks == size);
+        let grown = asks.all(|reason| reason.rule == Rule::BuildingDrainTable);
         let least = building_drain_size_at_least_slope(&case.operands, index);
         if grown && let Some(least) = least.filter(|least| *least < size) {
             report.add(
