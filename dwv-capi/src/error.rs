@@ -1,6 +1,6 @@
 //! Errors as objects.
 
-use crate::guard::{Refusal, given, guard, wanted};
+use crate::guard::{Refusal, free, give, given};
 use crate::status::dwv_status;
 use crate::text::{Texts, dwv_text};
 
@@ -20,7 +20,7 @@ pub struct dwv_error {
 pub struct dwv_fault {
     /// Its stable name, such as `unknown-id`.
     pub code: dwv_text,
-    /// Where in the layout: `drains[3].to`.
+    /// Where in the layout: `drains[3].to`; for a wrong argument, its name.
     pub path: dwv_text,
     /// The id of the element.
     pub element: dwv_text,
@@ -31,11 +31,19 @@ pub struct dwv_fault {
 }
 
 impl dwv_error {
-    pub(crate) fn boxed(status: dwv_status, refusal: Refusal) -> *mut Self {
+    pub(crate) fn new(status: dwv_status, refusal: Refusal) -> Self {
         let mut texts = Texts::default();
-        let error = match refusal {
-            Refusal::Call(_, message) => {
-                Self { status, message: texts.add(&message), faults: Vec::new(), total: 0, _texts: texts }
+        match refusal {
+            Refusal::Call { argument, message, .. } => {
+                let message = texts.add(&message);
+                let fault = dwv_fault {
+                    code: texts.add(status.code()),
+                    path: texts.add(argument),
+                    element: dwv_text::EMPTY,
+                    message,
+                    help: dwv_text::EMPTY,
+                };
+                Self { status, message, faults: vec![fault], total: 1, _texts: texts }
             }
             Refusal::Engine(error) => {
                 let message = texts.add(&error.to_string());
@@ -51,8 +59,7 @@ impl dwv_error {
                 }
                 Self { status, message, faults, total: error.total(), _texts: texts }
             }
-        };
-        Box::into_raw(Box::new(error))
+        }
     }
 }
 
@@ -96,26 +103,21 @@ pub unsafe extern "C" fn dwv_error_fault_total(error: *const dwv_error) -> usize
     unsafe { error.as_ref() }.map_or(0, |error| error.total)
 }
 
-/// One fault of an error: `DWV_ERROR_INDEX` when `index` is not below the count.
+/// Copies one fault of an error to `*fault`.
+///
+/// Status: `DWV_ERROR_INDEX` when `index` is not below the count, `DWV_ERROR_NULL`.
 ///
 /// # Safety
-/// `error` came from this library and was not freed; `fault` can be written to.
+/// `error` is NULL or came from this library and was not freed; `fault` is NULL or can be written to.
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn dwv_error_fault(error: *const dwv_error, index: usize, fault: *mut dwv_fault) -> dwv_status {
-    let work = || {
-        // SAFETY: the caller's contract.
-        let error = unsafe { given(error, "error") }?;
-        let place = wanted(fault, "fault")?;
-        let found = error.faults.get(index).ok_or_else(|| {
-            let message = format!("the error has {} faults", error.faults.len());
-            Refusal::status(dwv_status::DWV_ERROR_INDEX, &message)
-        })?;
-        // SAFETY: not NULL, and the caller's contract.
-        unsafe { place.write(*found) };
-        Ok(())
-    };
-    // SAFETY: no error object is wanted.
-    unsafe { guard(std::ptr::null_mut(), work) }
+    // SAFETY: the caller's contract; no error object is wanted.
+    unsafe {
+        give(fault, "fault", std::ptr::null_mut(), || {
+            let error = given(error, "error")?;
+            error.faults.get(index).copied().ok_or_else(|| Refusal::index("index", index, error.faults.len()))
+        })
+    }
 }
 
 /// Frees an error. NULL is accepted.
@@ -124,8 +126,6 @@ pub unsafe extern "C" fn dwv_error_fault(error: *const dwv_error, index: usize, 
 /// `error` is NULL or came from this library and was not freed.
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn dwv_error_free(error: *mut dwv_error) {
-    if !error.is_null() {
-        // SAFETY: the caller's contract; the box was made by `dwv_error::boxed`.
-        drop(unsafe { Box::from_raw(error) });
-    }
+    // SAFETY: the caller's contract.
+    unsafe { free(error) }
 }

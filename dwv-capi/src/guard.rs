@@ -3,21 +3,56 @@
 use std::panic::{AssertUnwindSafe, catch_unwind};
 
 use dwv_core::Error;
+use dwv_core::quantity::QuantityError;
 
 use crate::error::dwv_error;
 use crate::status::dwv_status;
 
+#[cfg(panic = "abort")]
+compile_error!("a panic must unwind to its guard: build without `panic = \"abort\"`");
+
 /// Why a call does not do its work.
-pub(crate) enum Refusal {
+#[derive(Debug)]
+pub enum Refusal {
     /// The engine refuses the input.
     Engine(Error),
-    /// The call itself is wrong.
-    Call(dwv_status, String),
+    /// An argument is wrong.
+    Call {
+        /// What the call comes back with.
+        status: dwv_status,
+        /// The name of the argument; empty where none is to blame.
+        argument: &'static str,
+        /// What is wrong with it.
+        message: String,
+    },
 }
 
 impl Refusal {
-    pub(crate) fn status(status: dwv_status, message: &str) -> Self {
-        Self::Call(status, message.to_owned())
+    pub(crate) fn call(status: dwv_status, argument: &'static str, message: String) -> Self {
+        Self::Call { status, argument, message }
+    }
+
+    pub(crate) fn null(argument: &'static str) -> Self {
+        Self::call(dwv_status::DWV_ERROR_NULL, argument, format!("`{argument}` is NULL"))
+    }
+
+    pub(crate) fn quantity(argument: &'static str, error: &QuantityError) -> Self {
+        Self::call(dwv_status::DWV_ERROR_QUANTITY, argument, error.to_string())
+    }
+
+    pub(crate) fn index(argument: &'static str, index: usize, count: usize) -> Self {
+        Self::call(
+            dwv_status::DWV_ERROR_INDEX,
+            argument,
+            format!("`{argument}` is {index}, expected less than {count}"),
+        )
+    }
+
+    fn status(&self) -> dwv_status {
+        match self {
+            Self::Engine(error) => dwv_status::of(error.kind()),
+            Self::Call { status, .. } => *status,
+        }
     }
 }
 
@@ -31,7 +66,8 @@ impl From<Error> for Refusal {
 ///
 /// # Safety
 /// `error` is NULL or can be written to.
-pub(crate) unsafe fn guard(error: *mut *mut dwv_error, work: impl FnOnce() -> Result<(), Refusal>) -> dwv_status {
+pub unsafe fn guard(error: *mut *mut dwv_error, work: impl FnOnce() -> Result<(), Refusal>) -> dwv_status {
+    // Nothing is looked at after a panic: handles never change, and the half-made answer is dropped.
     let refusal = match catch_unwind(AssertUnwindSafe(work)) {
         Ok(Ok(())) => {
             // SAFETY: the caller's contract.
@@ -39,65 +75,92 @@ pub(crate) unsafe fn guard(error: *mut *mut dwv_error, work: impl FnOnce() -> Re
             return dwv_status::DWV_OK;
         }
         Ok(Err(refusal)) => refusal,
-        Err(_) => Refusal::status(dwv_status::DWV_ERROR_INTERNAL, "a fault of this library, please report it"),
+        Err(payload) => {
+            let words = payload
+                .downcast_ref::<String>()
+                .map(String::as_str)
+                .or_else(|| payload.downcast_ref::<&str>().copied())
+                .unwrap_or("no words");
+            let message = format!("internal error of the engine, please report it: {words}");
+            Refusal::call(dwv_status::DWV_ERROR_INTERNAL, "", message)
+        }
     };
-    let status = match &refusal {
-        Refusal::Engine(error) => dwv_status::of(error.kind()),
-        Refusal::Call(status, _) => *status,
-    };
+    let status = refusal.status();
     if !error.is_null() {
-        // SAFETY: the caller's contract.
-        unsafe { put(error, dwv_error::boxed(status, refusal)) };
+        let boxed = Box::into_raw(Box::new(dwv_error::new(status, refusal)));
+        // SAFETY: not NULL, and the caller's contract.
+        unsafe { error.write(boxed) };
     }
     status
 }
 
-/// Runs work that cannot be refused.
-pub(crate) fn guard_plain<T>(otherwise: T, work: impl FnOnce() -> T) -> T {
-    catch_unwind(AssertUnwindSafe(work)).unwrap_or(otherwise)
+/// Makes a handle that the caller owns; when the call is refused, the place of the handle holds NULL.
+///
+/// # Safety
+/// `place` and `error` are NULL or can be written to.
+pub(crate) unsafe fn make<T>(
+    place: *mut *mut T,
+    name: &'static str,
+    error: *mut *mut dwv_error,
+    work: impl FnOnce() -> Result<T, Refusal>,
+) -> dwv_status {
+    // SAFETY: the caller's contract.
+    unsafe {
+        put(place, std::ptr::null_mut());
+        give(place, name, error, || work().map(|made| Box::into_raw(Box::new(made))))
+    }
+}
+
+/// Gives the caller a value; when the call is refused, the place of the value is not written to.
+///
+/// # Safety
+/// `place` and `error` are NULL or can be written to.
+pub(crate) unsafe fn give<T>(
+    place: *mut T,
+    name: &'static str,
+    error: *mut *mut dwv_error,
+    work: impl FnOnce() -> Result<T, Refusal>,
+) -> dwv_status {
+    let guarded = || {
+        if place.is_null() {
+            return Err(Refusal::null(name));
+        }
+        let value = work()?;
+        // SAFETY: not NULL, and the caller's contract.
+        unsafe { place.write(value) };
+        Ok(())
+    };
+    // SAFETY: the caller's contract.
+    unsafe { guard(error, guarded) }
 }
 
 /// Writes an output, when the caller wants it.
 ///
 /// # Safety
 /// `place` is NULL or can be written to.
-pub(crate) unsafe fn put<T>(place: *mut T, value: T) {
+unsafe fn put<T>(place: *mut T, value: T) {
     if !place.is_null() {
         // SAFETY: not NULL, and the caller's contract.
         unsafe { place.write(value) };
     }
 }
 
-/// An output that must be wanted.
-pub(crate) fn wanted<T>(place: *mut T, name: &str) -> Result<*mut T, Refusal> {
-    if place.is_null() {
-        return Err(Refusal::status(dwv_status::DWV_ERROR_NULL, &format!("`{name}` is NULL")));
-    }
-    Ok(place)
-}
-
 /// A handle that must be there.
 ///
 /// # Safety
 /// `handle` is NULL or came from this library, was not freed and is not written to during the call.
-pub(crate) unsafe fn given<'a, T>(handle: *const T, name: &str) -> Result<&'a T, Refusal> {
+pub(crate) unsafe fn given<'a, T>(handle: *const T, name: &'static str) -> Result<&'a T, Refusal> {
     // SAFETY: the caller's contract.
-    unsafe { handle.as_ref() }.ok_or_else(|| Refusal::status(dwv_status::DWV_ERROR_NULL, &format!("`{name}` is NULL")))
+    unsafe { handle.as_ref() }.ok_or_else(|| Refusal::null(name))
 }
 
-#[cfg(test)]
-mod tests {
-    use super::*;
-
-    #[test]
-    fn a_panic_stays_inside_and_becomes_a_status() {
-        let mut error = std::ptr::null_mut();
-        // SAFETY: the place of the error can be written to.
-        let status = unsafe { guard(&mut error, || panic!("provoked by a test")) };
-        assert_eq!(status, dwv_status::DWV_ERROR_INTERNAL);
-        assert!(!error.is_null());
-        // SAFETY: the error came from the guard.
-        unsafe { crate::error::dwv_error_free(error) };
-        assert_eq!(guard_plain(7, || panic!("provoked by a test")), 7);
+/// Frees a handle.
+///
+/// # Safety
+/// `handle` is NULL or was made by [`make`] or [`guard`] and not freed.
+pub(crate) unsafe fn free<T>(handle: *mut T) {
+    if !handle.is_null() {
+        // SAFETY: not NULL, and the caller's contract: it came out of a box.
+        drop(unsafe { Box::from_raw(handle) });
     }
 }

@@ -5,18 +5,18 @@ use std::ffi::c_char;
 use dwv_core::Layout;
 
 use crate::error::dwv_error;
-use crate::guard::{given, guard, wanted};
+use crate::guard::{free, given, make};
 use crate::status::dwv_status;
-use crate::text::{bytes, dwv_string};
+use crate::string::dwv_string;
+use crate::text::bytes;
 
 /// A drawn drainage and vent system. It is never changed, so that several threads may read it. Free it with `dwv_layout_free`.
 #[derive(Debug)]
 pub struct dwv_layout(pub(crate) Layout);
 
-/// Reads a layout file of the format `dwv-layout/1`.
+/// Reads a layout file of the format `dwv-layout/1`. The caller owns `*layout`; the bytes are not needed any more.
 ///
-/// On `DWV_OK` the caller owns `*layout`; else `*layout` is not written. `error` may be NULL; when it is not, `*error` is an object that
-/// the caller owns, or NULL on `DWV_OK`.
+/// Status: `DWV_ERROR_FORMAT` with all faults of the file, `DWV_ERROR_NULL`.
 ///
 /// # Safety
 /// `json` has `length` readable bytes; `layout`, and `error` unless NULL, can be written to.
@@ -27,19 +27,13 @@ pub unsafe extern "C" fn dwv_layout_from_json(
     layout: *mut *mut dwv_layout,
     error: *mut *mut dwv_error,
 ) -> dwv_status {
-    let work = || {
-        let place = wanted(layout, "layout")?;
-        // SAFETY: the caller's contract.
-        let read = Layout::from_json(unsafe { bytes(json, length) }?)?;
-        // SAFETY: not NULL, and the caller's contract.
-        unsafe { place.write(Box::into_raw(Box::new(dwv_layout(read)))) };
-        Ok(())
-    };
     // SAFETY: the caller's contract.
-    unsafe { guard(error, work) }
+    unsafe { make(layout, "layout", error, || Ok(dwv_layout(Layout::from_json(bytes(json, length, "json")?)?))) }
 }
 
 /// Writes a layout as a file of the format `dwv-layout/1`, one element a line. The caller owns `*json`.
+///
+/// Status: `DWV_ERROR_NULL`.
 ///
 /// # Safety
 /// `layout` came from this library and was not freed; `json`, and `error` unless NULL, can be written to.
@@ -49,16 +43,8 @@ pub unsafe extern "C" fn dwv_layout_to_json(
     json: *mut *mut dwv_string,
     error: *mut *mut dwv_error,
 ) -> dwv_status {
-    let work = || {
-        // SAFETY: the caller's contract.
-        let layout = unsafe { given(layout, "layout") }?;
-        let place = wanted(json, "json")?;
-        // SAFETY: not NULL, and the caller's contract.
-        unsafe { place.write(dwv_string::boxed(&layout.0.to_json())) };
-        Ok(())
-    };
     // SAFETY: the caller's contract.
-    unsafe { guard(error, work) }
+    unsafe { make(json, "json", error, || Ok(dwv_string::new(&given(layout, "layout")?.0.to_json()))) }
 }
 
 /// Frees a layout. NULL is accepted.
@@ -67,8 +53,6 @@ pub unsafe extern "C" fn dwv_layout_to_json(
 /// `layout` is NULL or came from this library and was not freed.
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn dwv_layout_free(layout: *mut dwv_layout) {
-    if !layout.is_null() {
-        // SAFETY: the caller's contract; the box was made by `dwv_layout_from_json`.
-        drop(unsafe { Box::from_raw(layout) });
-    }
+    // SAFETY: the caller's contract.
+    unsafe { free(layout) }
 }

@@ -4,19 +4,30 @@
 //! takes its outputs last; an optional `dwv_error **` receives an object with all faults. There is no global state.
 #![allow(non_camel_case_types)] // The names of C.
 
+mod answer;
 mod edition;
 mod error;
-mod guard;
+#[doc(hidden)] // Public for a test that provokes a panic behind the guard; nothing of it is exported to C.
+pub mod guard;
 mod layout;
+mod quantity;
 mod rows;
 mod sizing;
 mod status;
+mod string;
+mod table_value;
 mod text;
+mod version;
 
+pub use answer::*;
 pub use edition::*;
 pub use error::*;
 pub use layout::*;
+pub use quantity::*;
 pub use rows::*;
 pub use sizing::*;
 pub use status::*;
+pub use string::*;
+pub use table_value::*;
 pub use text::*;
+pub use version::*;

@@ -1,15 +1,16 @@
-//! A sized layout: its texts. Its rows are in `rows`.
+//! Sizing a layout, and the texts of the result. Its rows are in `rows`.
 
 use std::ffi::c_char;
 
 use dwv_core::{Edition, Sizing, Unattested};
 
 use crate::error::dwv_error;
-use crate::guard::{Refusal, given, guard, wanted};
+use crate::guard::{Refusal, free, given, make};
 use crate::layout::dwv_layout;
 use crate::rows::Rows;
 use crate::status::dwv_status;
-use crate::text::{Texts, dwv_string, dwv_text, optional, text};
+use crate::string::dwv_string;
+use crate::text::{optional, text};
 
 /// What is done with a size that rests on a value which nobody has seen in print.
 #[repr(C)]
@@ -34,13 +35,14 @@ pub struct dwv_size_options {
 /// A sized layout. It is never changed, so that several threads may read it. Free it with `dwv_sizing_free`.
 #[derive(Debug)]
 pub struct dwv_sizing {
-    pub(crate) sizing: Sizing,
+    sizing: Sizing,
     pub(crate) rows: Rows,
-    unattested: dwv_text,
-    _texts: Texts,
 }
 
-/// Sizes a layout. On `DWV_OK` the caller owns `*sizing`, which does not need the layout any more. `options` and `error` may be NULL.
+/// Sizes a layout. The caller owns `*sizing`, which does not need the layout any more. `options` may be NULL for the defaults.
+///
+/// Status: `DWV_ERROR_DRAWING` with all faults of the drawing, `DWV_ERROR_EDITION`, `DWV_ERROR_QUESTION` for an unknown option,
+/// `DWV_ERROR_TEXT`, `DWV_ERROR_NULL`.
 ///
 /// # Safety
 /// `layout` came from this library and was not freed; `options` is NULL or can be read; `sizing`, and `error` unless NULL, can be
@@ -54,73 +56,56 @@ pub unsafe extern "C" fn dwv_size(
 ) -> dwv_status {
     let work = || {
         // SAFETY: the caller's contract.
-        let layout = unsafe { given(layout, "layout") }?;
-        let place = wanted(sizing, "sizing")?;
-        // SAFETY: the caller's contract.
-        let options = unsafe { options.as_ref() };
+        let (layout, options) = unsafe { (given(layout, "layout")?, options.as_ref()) };
         let named = match options {
             // SAFETY: the caller's contract.
-            Some(options) => unsafe { optional(options.edition) }?,
+            Some(options) => unsafe { optional(options.edition, "options.edition") }?,
             None => None,
         };
         let unattested = match options.map_or(0, |options| options.unattested) {
             0 => Unattested::Tell,
             1 => Unattested::Refuse,
             other => {
-                let message = format!("`unattested` is {other}, expected 0 or 1");
-                return Err(Refusal::status(dwv_status::DWV_ERROR_QUESTION, &message));
+                let message = format!("`options.unattested` is {other}, expected a number of dwv_unattested");
+                return Err(Refusal::call(dwv_status::DWV_ERROR_QUESTION, "options.unattested", message));
             }
         };
         let edition = Edition::builtin(named.unwrap_or(&layout.0.edition))?;
-        let sized = Sizing::of(&layout.0, edition, unattested)?;
-        let mut texts = Texts::default();
-        let told = texts.add(sized.summary().unattested.as_deref().unwrap_or_default());
-        let rows = Rows::new(&sized);
-        let boxed = Box::new(dwv_sizing { sizing: sized, rows, unattested: told, _texts: texts });
-        // SAFETY: not NULL, and the caller's contract.
-        unsafe { place.write(Box::into_raw(boxed)) };
-        Ok(())
+        let sizing = Sizing::of(&layout.0, edition, unattested)?;
+        Ok(dwv_sizing { rows: Rows::new(&sizing), sizing })
     };
     // SAFETY: the caller's contract.
-    unsafe { guard(error, work) }
+    unsafe { make(sizing, "sizing", error, work) }
 }
 
-/// Frees a sizing. NULL is accepted.
+/// Frees a sizing with all texts and rows that point into it. NULL is accepted.
 ///
 /// # Safety
 /// `sizing` is NULL or came from this library and was not freed.
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn dwv_sizing_free(sizing: *mut dwv_sizing) {
-    if !sizing.is_null() {
-        // SAFETY: the caller's contract; the box was made by `dwv_size`.
-        drop(unsafe { Box::from_raw(sizing) });
-    }
+    // SAFETY: the caller's contract.
+    unsafe { free(sizing) }
 }
 
-/// Gives the caller a text of a sizing.
+/// Makes a text of a sizing for the caller.
 ///
 /// # Safety
 /// As the functions that call it.
-unsafe fn give(
+unsafe fn write(
     sizing: *const dwv_sizing,
     place: *mut *mut dwv_string,
+    name: &'static str,
     error: *mut *mut dwv_error,
-    write: impl FnOnce(&Sizing) -> Result<String, Refusal>,
+    words: impl FnOnce(&Sizing) -> Result<String, Refusal>,
 ) -> dwv_status {
-    let work = || {
-        // SAFETY: the caller's contract.
-        let sizing = unsafe { given(sizing, "sizing") }?;
-        let place = wanted(place, "string")?;
-        let text = write(&sizing.sizing)?;
-        // SAFETY: not NULL, and the caller's contract.
-        unsafe { place.write(dwv_string::boxed(&text)) };
-        Ok(())
-    };
     // SAFETY: the caller's contract.
-    unsafe { guard(error, work) }
+    unsafe { make(place, name, error, || Ok(dwv_string::new(&words(&given(sizing, "sizing")?.sizing)?))) }
 }
 
 /// The whole result as canonical JSON, the same bytes from every face. The caller owns `*json`.
+///
+/// Status: `DWV_ERROR_NULL`.
 ///
 /// # Safety
 /// `sizing` came from this library and was not freed; `json`, and `error` unless NULL, can be written to.
@@ -131,10 +116,12 @@ pub unsafe extern "C" fn dwv_sizing_to_json(
     error: *mut *mut dwv_error,
 ) -> dwv_status {
     // SAFETY: the caller's contract.
-    unsafe { give(sizing, json, error, |sizing| Ok(sizing.to_json())) }
+    unsafe { write(sizing, json, "json", error, |sizing| Ok(sizing.to_json())) }
 }
 
 /// The whole report as aligned text. The caller owns `*report`.
+///
+/// Status: `DWV_ERROR_NULL`.
 ///
 /// # Safety
 /// `sizing` came from this library and was not freed; `report`, and `error` unless NULL, can be written to.
@@ -145,13 +132,16 @@ pub unsafe extern "C" fn dwv_sizing_to_text(
     error: *mut *mut dwv_error,
 ) -> dwv_status {
     // SAFETY: the caller's contract.
-    unsafe { give(sizing, report, error, |sizing| Ok(sizing.to_text())) }
+    unsafe { write(sizing, report, "report", error, |sizing| Ok(sizing.to_text())) }
 }
 
 /// One schedule as comma-separated values: `pipes`, `vents`, `fixtures`, `inverts` or `findings`. The caller owns `*csv`.
 ///
+/// Status: `DWV_ERROR_QUESTION` for another name, `DWV_ERROR_TEXT`, `DWV_ERROR_NULL`.
+///
 /// # Safety
-/// `sizing` came from this library and was not freed; `name` has `length` readable bytes; `csv`, and `error` unless NULL, can be written to.
+/// `sizing` came from this library and was not freed; `name` has `length` readable bytes; `csv`, and `error` unless NULL, can be
+/// written to.
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn dwv_sizing_schedule_csv(
     sizing: *const dwv_sizing,
@@ -161,10 +151,33 @@ pub unsafe extern "C" fn dwv_sizing_schedule_csv(
     error: *mut *mut dwv_error,
 ) -> dwv_status {
     // SAFETY: the caller's contract.
-    unsafe { give(sizing, csv, error, |sizing| Ok(sizing.schedule(text(name, length)?)?.to_csv())) }
+    unsafe { write(sizing, csv, "csv", error, |sizing| Ok(sizing.schedule(text(name, length, "name")?)?.to_csv())) }
+}
+
+/// One schedule as aligned text, by the names of `dwv_sizing_schedule_csv`. The caller owns `*table`.
+///
+/// Status: `DWV_ERROR_QUESTION` for another name, `DWV_ERROR_TEXT`, `DWV_ERROR_NULL`.
+///
+/// # Safety
+/// `sizing` came from this library and was not freed; `name` has `length` readable bytes; `table`, and `error` unless NULL, can be
+/// written to.
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn dwv_sizing_schedule_text(
+    sizing: *const dwv_sizing,
+    name: *const c_char,
+    length: usize,
+    table: *mut *mut dwv_string,
+    error: *mut *mut dwv_error,
+) -> dwv_status {
+    // SAFETY: the caller's contract.
+    unsafe {
+        write(sizing, table, "table", error, |sizing| Ok(sizing.schedule(text(name, length, "name")?)?.to_text()))
+    }
 }
 
 /// Why a pipe, fixture or terminal is what it is, in words. The caller owns `*explanation`.
+///
+/// Status: `DWV_ERROR_QUESTION` when nothing has the id, with the nearest; `DWV_ERROR_TEXT`, `DWV_ERROR_NULL`.
 ///
 /// # Safety
 /// `sizing` came from this library and was not freed; `id` has `length` readable bytes; `explanation`, and `error` unless NULL, can be
@@ -178,16 +191,5 @@ pub unsafe extern "C" fn dwv_sizing_why(
     error: *mut *mut dwv_error,
 ) -> dwv_status {
     // SAFETY: the caller's contract.
-    unsafe { give(sizing, explanation, error, |sizing| Ok(sizing.why(text(id, length)?)?)) }
-}
-
-/// One line on the sizes that rest on values which nobody has seen in print; empty when there is none, and for NULL. It lives until the
-/// sizing is freed.
-///
-/// # Safety
-/// `sizing` is NULL or came from this library and was not freed.
-#[unsafe(no_mangle)]
-pub unsafe extern "C" fn dwv_sizing_unattested(sizing: *const dwv_sizing) -> dwv_text {
-    // SAFETY: the caller's contract.
-    unsafe { sizing.as_ref() }.map_or(dwv_text::EMPTY, |sizing| sizing.unattested)
+    unsafe { write(sizing, explanation, "explanation", error, |sizing| Ok(sizing.why(text(id, length, "id")?)?)) }
 }

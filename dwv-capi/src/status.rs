@@ -2,7 +2,6 @@
 
 use dwv_core::ErrorKind;
 
-use crate::guard::guard_plain;
 use crate::text::dwv_text;
 
 /// What a call came back with. Values never change; new ones may be added.
@@ -19,7 +18,7 @@ pub enum dwv_status {
     DWV_ERROR_QUANTITY = 3,
     /// The edition is not known.
     DWV_ERROR_EDITION = 4,
-    /// Nothing has the id, kind or name that was asked for.
+    /// Nothing has the id, kind or name that was asked for, or the edition gives no such value.
     DWV_ERROR_QUESTION = 5,
     /// A pointer that must not be NULL is NULL.
     DWV_ERROR_NULL = 6,
@@ -31,51 +30,73 @@ pub enum dwv_status {
     DWV_ERROR_INTERNAL = 9,
 }
 
+use dwv_status::*;
+
 impl dwv_status {
+    const ALL: [Self; 10] = [
+        DWV_OK,
+        DWV_ERROR_FORMAT,
+        DWV_ERROR_DRAWING,
+        DWV_ERROR_QUANTITY,
+        DWV_ERROR_EDITION,
+        DWV_ERROR_QUESTION,
+        DWV_ERROR_NULL,
+        DWV_ERROR_INDEX,
+        DWV_ERROR_TEXT,
+        DWV_ERROR_INTERNAL,
+    ];
+
     pub(crate) fn of(kind: ErrorKind) -> Self {
         match kind {
-            ErrorKind::Format => Self::DWV_ERROR_FORMAT,
-            ErrorKind::Drawing => Self::DWV_ERROR_DRAWING,
-            ErrorKind::Quantity => Self::DWV_ERROR_QUANTITY,
-            ErrorKind::Edition => Self::DWV_ERROR_EDITION,
-            ErrorKind::Question => Self::DWV_ERROR_QUESTION,
-            _ => Self::DWV_ERROR_INTERNAL,
+            ErrorKind::Format => DWV_ERROR_FORMAT,
+            ErrorKind::Drawing => DWV_ERROR_DRAWING,
+            ErrorKind::Quantity => DWV_ERROR_QUANTITY,
+            ErrorKind::Edition => DWV_ERROR_EDITION,
+            ErrorKind::Question => DWV_ERROR_QUESTION,
+            // A kind that this face does not know yet.
+            _ => DWV_ERROR_INTERNAL,
         }
+    }
+
+    /// The stable name of the fault of a wrong call.
+    pub(crate) fn code(self) -> &'static str {
+        match self {
+            DWV_OK => "ok",
+            DWV_ERROR_FORMAT => "wrong-format",
+            DWV_ERROR_DRAWING => "wrong-drawing",
+            DWV_ERROR_QUANTITY => "wrong-quantity",
+            DWV_ERROR_EDITION => "unknown-edition",
+            DWV_ERROR_QUESTION => "no-answer",
+            DWV_ERROR_NULL => "null",
+            DWV_ERROR_INDEX => "out-of-range",
+            DWV_ERROR_TEXT => "not-utf8",
+            DWV_ERROR_INTERNAL => "internal",
+        }
+    }
+
+    fn text(self) -> dwv_text {
+        dwv_text::of_static(match self {
+            DWV_OK => c"ok",
+            DWV_ERROR_FORMAT => c"the bytes are no layout file",
+            DWV_ERROR_DRAWING => c"the drawing is no drainage system",
+            DWV_ERROR_QUANTITY => c"a quantity cannot be read or is out of range",
+            DWV_ERROR_EDITION => c"the edition is not known",
+            DWV_ERROR_QUESTION => {
+                c"nothing has the id, kind or name that was asked for, or the edition gives no such value"
+            }
+            DWV_ERROR_NULL => c"a pointer is NULL that must not be",
+            DWV_ERROR_INDEX => c"an index is not below the count",
+            DWV_ERROR_TEXT => c"a text is not UTF-8",
+            DWV_ERROR_INTERNAL => c"a fault of this library, please report it",
+        })
     }
 }
 
 /// A status in words, for any number. The text lives as long as the program.
 #[unsafe(no_mangle)]
 pub extern "C" fn dwv_status_text(status: i32) -> dwv_text {
-    guard_plain(dwv_text::EMPTY, || {
-        dwv_text::of_static(match status {
-            0 => c"ok",
-            1 => c"the bytes are no layout file",
-            2 => c"the drawing is no drainage system",
-            3 => c"a quantity cannot be read or is out of range",
-            4 => c"the edition is not known",
-            5 => c"nothing has the id, kind or name that was asked for",
-            6 => c"a pointer is NULL that must not be",
-            7 => c"an index is not below the count",
-            8 => c"a text is not UTF-8",
-            9 => c"a fault of this library, please report it",
-            _ => c"unknown status",
-        })
-    })
-}
-
-/// The version of this binary interface: it rises when a program built for an older one could break.
-#[unsafe(no_mangle)]
-pub extern "C" fn dwv_abi_version() -> u32 {
-    1
-}
-
-/// The caution that every report carries. The text lives as long as the program.
-#[unsafe(no_mangle)]
-pub extern "C" fn dwv_caution() -> dwv_text {
-    dwv_text::of_static(
-        c"These results support, and do not replace, the local code in force, the authority having jurisdiction and a licensed practitioner.",
-    )
+    let found = dwv_status::ALL.into_iter().find(|listed| *listed as i32 == status);
+    found.map_or(dwv_text::of_static(c"unknown status"), dwv_status::text)
 }
 
 #[cfg(test)]
@@ -83,9 +104,9 @@ mod tests {
     use super::*;
 
     #[test]
-    fn the_caution_is_that_of_the_core() {
-        // SAFETY: the text is static.
-        let text = unsafe { std::ffi::CStr::from_ptr(dwv_caution().data) };
-        assert_eq!(text.to_str(), Ok(dwv_core::schedule::CAUTION));
+    fn every_status_has_its_number() {
+        for (number, status) in dwv_status::ALL.into_iter().enumerate() {
+            assert_eq!(status as usize, number);
+        }
     }
 }

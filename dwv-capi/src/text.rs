@@ -1,6 +1,6 @@
 //! Texts across the border.
 
-use std::ffi::{CStr, CString, c_char};
+use std::ffi::{CStr, c_char};
 
 use crate::guard::Refusal;
 use crate::status::dwv_status;
@@ -16,73 +16,50 @@ pub struct dwv_text {
 }
 
 impl dwv_text {
-    pub(crate) const EMPTY: Self = Self { data: c"".as_ptr(), length: 0 };
+    pub(crate) const EMPTY: Self = Self::of_static(c"");
 
-    pub(crate) fn of_static(text: &'static CStr) -> Self {
+    pub(crate) const fn of_static(text: &'static CStr) -> Self {
         Self { data: text.as_ptr(), length: text.count_bytes() }
     }
 
     /// Whether it is this text.
-    pub(crate) fn is(&self, other: &str) -> bool {
-        // SAFETY: a view is only made of a text that lives as long as its owner, which holds the view.
+    ///
+    /// # Safety
+    /// The owner of the view is still there.
+    pub(crate) unsafe fn is(&self, other: &str) -> bool {
+        // SAFETY: a view is as long as its text, which lives as long as its owner.
         unsafe { std::slice::from_raw_parts(self.data.cast::<u8>(), self.length) == other.as_bytes() }
     }
-
-    pub(crate) fn of(text: &CStr) -> Self {
-        Self { data: text.as_ptr(), length: text.count_bytes() }
-    }
-}
-
-/// Text with a zero byte at its end. A zero byte within, which C could not tell from the end, is shown as a replacement character.
-pub(crate) fn c_string(text: &str) -> CString {
-    CString::new(text).unwrap_or_else(|_| CString::new(text.replace('\0', "\u{fffd}")).unwrap_or_default())
 }
 
 /// Texts that live together; their addresses do not change when more are added.
 #[derive(Debug, Default)]
-pub(crate) struct Texts(Vec<CString>);
+pub(crate) struct Texts {
+    /// Each page takes its room once: a vector that never grows beyond its room never moves.
+    pages: Vec<Vec<u8>>,
+}
+
+/// Room for the texts of a few rows; a longer text has a page of its own.
+const PAGE: usize = 4096;
 
 impl Texts {
+    /// Adds a text. A zero byte within, which C could not tell from the end, is shown as a replacement character.
     pub(crate) fn add(&mut self, text: &str) -> dwv_text {
         if text.is_empty() {
             return dwv_text::EMPTY;
         }
-        let text = c_string(text);
-        let view = dwv_text::of(&text);
-        self.0.push(text);
-        view
-    }
-}
-
-/// A text that the caller owns; free it with `dwv_string_free`.
-#[derive(Debug)]
-pub struct dwv_string(CString);
-
-impl dwv_string {
-    pub(crate) fn boxed(text: &str) -> *mut Self {
-        Box::into_raw(Box::new(Self(c_string(text))))
-    }
-}
-
-/// The text of a string. It lives until the string is freed. NULL gives an empty text.
-///
-/// # Safety
-/// `string` is NULL or came from this library and was not freed.
-#[unsafe(no_mangle)]
-pub unsafe extern "C" fn dwv_string_text(string: *const dwv_string) -> dwv_text {
-    // SAFETY: the caller's contract.
-    unsafe { string.as_ref() }.map_or(dwv_text::EMPTY, |string| dwv_text::of(&string.0))
-}
-
-/// Frees a string. NULL is accepted.
-///
-/// # Safety
-/// `string` is NULL or came from this library and was not freed.
-#[unsafe(no_mangle)]
-pub unsafe extern "C" fn dwv_string_free(string: *mut dwv_string) {
-    if !string.is_null() {
-        // SAFETY: the caller's contract; the box was made by `dwv_string::boxed`.
-        drop(unsafe { Box::from_raw(string) });
+        if text.contains('\0') {
+            return self.add(&text.replace('\0', "\u{fffd}"));
+        }
+        let needed = text.len() + 1;
+        if self.pages.last().is_none_or(|page| page.capacity() - page.len() < needed) {
+            self.pages.push(Vec::with_capacity(PAGE.max(needed)));
+        }
+        let Some(page) = self.pages.last_mut() else { return dwv_text::EMPTY };
+        let start = page.len();
+        page.extend_from_slice(text.as_bytes());
+        page.push(0);
+        dwv_text { data: page[start..].as_ptr().cast(), length: text.len() }
     }
 }
 
@@ -90,14 +67,14 @@ pub unsafe extern "C" fn dwv_string_free(string: *mut dwv_string) {
 ///
 /// # Safety
 /// `data` is NULL or has `length` readable bytes that do not change during the call.
-pub(crate) unsafe fn bytes<'a>(data: *const c_char, length: usize) -> Result<&'a [u8], Refusal> {
+pub(crate) unsafe fn bytes<'a>(data: *const c_char, length: usize, name: &'static str) -> Result<&'a [u8], Refusal> {
     if data.is_null() {
-        return Err(Refusal::status(dwv_status::DWV_ERROR_NULL, "a text is NULL"));
+        return Err(Refusal::null(name));
     }
     if length > isize::MAX as usize {
-        return Err(Refusal::status(dwv_status::DWV_ERROR_TEXT, "a text is longer than any memory"));
+        return Err(Refusal::call(dwv_status::DWV_ERROR_TEXT, name, "the text is longer than any memory".to_owned()));
     }
-    // SAFETY: not NULL, and the caller's contract.
+    // SAFETY: not NULL, no longer than any object, and the caller's contract.
     Ok(unsafe { std::slice::from_raw_parts(data.cast(), length) })
 }
 
@@ -105,24 +82,47 @@ pub(crate) unsafe fn bytes<'a>(data: *const c_char, length: usize) -> Result<&'a
 ///
 /// # Safety
 /// As [`bytes`].
-pub(crate) unsafe fn text<'a>(data: *const c_char, length: usize) -> Result<&'a str, Refusal> {
+pub(crate) unsafe fn text<'a>(data: *const c_char, length: usize, name: &'static str) -> Result<&'a str, Refusal> {
     // SAFETY: the caller's contract.
-    let bytes = unsafe { bytes(data, length) }?;
-    std::str::from_utf8(bytes).map_err(|error| {
-        let message = format!("the text is not UTF-8 at byte {}", error.valid_up_to());
-        Refusal::status(dwv_status::DWV_ERROR_TEXT, &message)
-    })
+    utf8(unsafe { bytes(data, length, name) }?, name)
 }
 
 /// The text that ends with a zero byte, which a caller hands in; none for NULL.
 ///
 /// # Safety
 /// `data` is NULL or ends with a zero byte.
-pub(crate) unsafe fn optional<'a>(data: *const c_char) -> Result<Option<&'a str>, Refusal> {
+pub(crate) unsafe fn optional<'a>(data: *const c_char, name: &'static str) -> Result<Option<&'a str>, Refusal> {
     if data.is_null() {
         return Ok(None);
     }
     // SAFETY: not NULL, and the caller's contract.
     let text = unsafe { CStr::from_ptr(data) };
-    text.to_str().map(Some).map_err(|_| Refusal::status(dwv_status::DWV_ERROR_TEXT, "a text is not UTF-8"))
+    utf8(text.to_bytes(), name).map(Some)
+}
+
+fn utf8<'a>(bytes: &'a [u8], name: &'static str) -> Result<&'a str, Refusal> {
+    std::str::from_utf8(bytes).map_err(|error| {
+        let message = format!("the text is not UTF-8 at byte {}", error.valid_up_to());
+        Refusal::call(dwv_status::DWV_ERROR_TEXT, name, message)
+    })
+}
+
+#[cfg(test)]
+mod tests {
+    use super::*;
+
+    #[test]
+    fn texts_stay_where_they_are() {
+        let mut texts = Texts::default();
+        let written: Vec<String> = (0..2000).map(|index| "ü".repeat(index % 700) + &index.to_string()).collect();
+        let views: Vec<dwv_text> = written.iter().map(|text| texts.add(text)).collect();
+        for (text, view) in written.iter().zip(views) {
+            // SAFETY: `texts` is still there.
+            let read = unsafe { CStr::from_ptr(view.data) };
+            assert_eq!((read.to_str(), view.length), (Ok(text.as_str()), text.len()));
+        }
+        let view = texts.add("a\0b");
+        // SAFETY: `texts` is still there.
+        assert_eq!(unsafe { CStr::from_ptr(view.data) }.to_str(), Ok("a\u{fffd}b"));
+    }
 }

@@ -80,7 +80,7 @@ impl Lists {
         self.vertical(house, &joint(1), &joint(2));
         self.level(house, &joint(2), &joint(3), 1200);
         self.level(house, &joint(3), to, 900);
-        self.vent(house, &joint(1), "attic", 3200);
+        self.vent(house, &joint(1), "attic", 8200);
     }
 
     /// A sink with a stack of its own.
