@@ -139,6 +139,59 @@ fn every_case_gives_the_canonical_result() {
     assert_eq!(count, stated.trim().parse::<usize>().unwrap());
 }
 
+/// Headers, libraries and the description for pkg-config in the folders where packages put them.
+fn install(prefix: &Path, library: &str) {
+    for folder in ["include", "lib/pkgconfig"] {
+        std::fs::create_dir_all(prefix.join(folder)).unwrap();
+    }
+    std::fs::copy(root().join("include/dwv.h"), prefix.join("include/dwv.h")).unwrap();
+    std::fs::copy(build::built().join(library), prefix.join("lib").join(library)).unwrap();
+    let description = std::fs::read_to_string(root().join("dwv-capi/dwv.pc.in")).unwrap();
+    let description =
+        description.replace("@prefix@", &prefix.to_string_lossy()).replace("@version@", env!("CARGO_PKG_VERSION"));
+    std::fs::write(prefix.join("lib/pkgconfig/dwv.pc"), description).unwrap();
+}
+
+/// The example compiles with what pkg-config says of an installed library, and not without.
+fn compiles_where_installed(library: &str, flags: &[&str]) {
+    if !is_at_hand("pkg-config") {
+        println!("pkg-config is not installed: its description was not tried");
+        return;
+    }
+    let prefix = build::temporary().join(format!("installed-{library}"));
+    install(&prefix, library);
+    let mut asked = Command::new("pkg-config");
+    asked.args(flags).args(["--cflags", "--libs", &format!("dwv = {}", env!("CARGO_PKG_VERSION"))]);
+    let told = asked.env("PKG_CONFIG_PATH", prefix.join("lib/pkgconfig")).output().unwrap();
+    assert!(told.status.success(), "{}", text(&told.stderr));
+    let told = text(&told.stdout);
+    let program = prefix.join("size_house");
+    let compile = |arguments: &[&str]| {
+        let source = root().join("dwv-capi/examples/size_house.c");
+        Command::new("cc").arg(source).args(arguments).arg("-o").arg(&program).output().unwrap().status.success()
+    };
+    assert!(!compile(&[]));
+    assert!(compile(&told.split_whitespace().collect::<Vec<_>>()), "{told}");
+    let mut command = Command::new(&program);
+    command.arg("python-examples/house.layout.json").current_dir(root());
+    let output = command.env("LD_LIBRARY_PATH", prefix.join("lib")).output().unwrap();
+    assert!(output.status.success() && output.stdout.len() > 1000, "{}", text(&output.stderr));
+}
+
+#[test]
+fn the_example_compiles_with_an_installed_static_library() {
+    compiles_where_installed("libdwv.a", &["--static"]);
+}
+
+#[test]
+fn the_example_compiles_with_an_installed_shared_library() {
+    if cfg!(target_os = "linux") {
+        compiles_where_installed("libdwv.so", &[]);
+    } else {
+        println!("only tried on Linux: shared libraries have other names elsewhere");
+    }
+}
+
 /// The checks of a file against its published tables, as questions and answers.
 fn published(file: &Path) -> (String, Vec<String>) {
     let file: BTreeMap<String, Vec<Map<String, Value>>> =

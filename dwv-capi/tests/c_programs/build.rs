@@ -10,7 +10,7 @@ pub fn root() -> PathBuf {
 }
 
 /// The folder where what belongs to this test was built.
-fn built() -> PathBuf {
+pub fn built() -> PathBuf {
     std::env::current_exe().unwrap().parent().unwrap().to_path_buf()
 }
 
@@ -20,7 +20,7 @@ fn library() -> PathBuf {
 }
 
 /// Where programs are written.
-fn temporary() -> &'static Path {
+pub fn temporary() -> &'static Path {
     Path::new(env!("CARGO_TARGET_TMPDIR"))
 }
 

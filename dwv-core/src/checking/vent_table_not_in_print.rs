@@ -25,7 +25,7 @@ fn run(case: &Case<'_>, report: &mut Report<'_>) {
 fn unsure<'a>(case: &'a Case<'_>) -> impl Iterator<Item = usize> + 'a {
     (0..case.operands.network.vents.len()).filter(|vent| {
         case.sizes.vent_reasons.of(*vent).iter().any(|reason| {
-            reason.rule == Rule::VentLength && !case.operands.edition.citation(reason.citation).witness.is_attested()
+            reason.rule == Rule::VentLength && !case.operands.edition.witness(reason.citation).is_attested()
         })
     })
 }

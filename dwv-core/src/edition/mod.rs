@@ -85,6 +85,8 @@ pub struct Edition {
     pub rules: Rules,
     /// Questions that its sources leave open, with the reading taken.
     pub open_questions: Vec<String>,
+    /// The witness of each citation, close together for the passes.
+    witnesses: Vec<Witness>,
 }
 
 /// The editions that come with the engine.
@@ -114,6 +116,12 @@ impl Edition {
     #[must_use]
     pub fn citation(&self, id: CitationId) -> &Citation {
         &self.citations[id.index()]
+    }
+
+    /// How sure a value is.
+    #[must_use]
+    pub fn witness(&self, id: CitationId) -> Witness {
+        self.witnesses[id.index()]
     }
 
     /// The least slope of a drain of a size: by rule up to 6 in, beyond it the flattest that the load table has.

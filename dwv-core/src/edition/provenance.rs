@@ -7,7 +7,7 @@ impl Edition {
     pub fn unattested(&self) -> impl Iterator<Item = CitationId> + '_ {
         (0..self.citations.len())
             .map(|index| CitationId(u16::try_from(index).unwrap_or(u16::MAX)))
-            .filter(|id| !self.citation(*id).witness.is_attested())
+            .filter(|id| !self.witness(*id).is_attested())
     }
 
     /// Every table, rule and reading with its clause, its witness and its sources, in Markdown.

@@ -167,6 +167,7 @@ fn build(raw: RawEdition, faults: &mut Faults) -> Option<Edition> {
         id: raw.id,
         title: raw.title,
         short: raw.short,
+        witnesses: cites.witnesses(),
         citations: cites.list(),
         sources,
         pipe_sizes: raw.pipe_sizes.into_iter().collect(),

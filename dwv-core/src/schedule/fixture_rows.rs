@@ -69,7 +69,7 @@ impl Sizing {
             _ => self.clause(load.citation),
         };
         let stated = fixtures.load_source[index] == LoadSource::Stated;
-        let load_witness = (!stated).then(|| self.edition.citation(load.citation).witness);
+        let load_witness = (!stated).then(|| self.edition.witness(load.citation));
         let kind = fixtures.kind[index];
         FixtureRow {
             id: fixtures.id[index].to_string(),

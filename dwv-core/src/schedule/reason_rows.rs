@@ -72,9 +72,9 @@ impl Sizing {
     /// Whether a size is decided: by whether it is sure, and whether something that it needs is missing.
     pub(super) fn status(&self, reasons: &[Reason], sure: bool, missing: bool) -> Status {
         // A table that nobody here has seen in print could ask for more than it is remembered to.
-        let certain = !reasons.iter().any(|reason| {
-            reason.rule == Rule::VentLength && !self.edition.citation(reason.citation).witness.is_attested()
-        });
+        let certain = !reasons
+            .iter()
+            .any(|reason| reason.rule == Rule::VentLength && !self.edition.witness(reason.citation).is_attested());
         let sure = sure && certain;
         if missing || (!sure && self.unattested == Unattested::Refuse) {
             Status::CannotDecide

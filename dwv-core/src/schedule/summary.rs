@@ -104,7 +104,7 @@ impl Sizing {
         let mut ids: Vec<&str> = Vec::new();
         let mut clauses: BTreeSet<String> = BTreeSet::new();
         for (id, sure, size, reasons) in drains.chain(vents).chain(ends) {
-            let attested = |reason: &Reason| self.edition.citation(reason.citation).witness.is_attested();
+            let attested = |reason: &Reason| self.edition.witness(reason.citation).is_attested();
             let uncertain = reasons.iter().any(|reason| reason.rule == Rule::VentLength && !attested(reason));
             if sure && !uncertain {
                 continue;

@@ -98,7 +98,7 @@ impl Sizes {
 
     /// A size is sure when a reason that asks for it was seen in print or passes on a sure size.
     fn find_sure_sizes(&mut self, edition: &Edition) {
-        let attested = |reason: &Reason| edition.citation(reason.citation).witness.is_attested();
+        let attested = |reason: &Reason| edition.witness(reason.citation).is_attested();
         refill(&mut self.vent_sure, self.vent.len(), false);
         for index in 0..self.vent.len() {
             let size = self.vent[index];

@@ -134,7 +134,7 @@ impl Reason {
     /// Of reasons that ask for one size, the lowest rank is shown: one that stands by itself and was seen in print, then one that passes
     /// on the size of another pipe, then one that nobody here has seen in print.
     fn rank(&self, edition: &Edition) -> (u8, Witness) {
-        let witness = edition.citation(self.citation).witness;
+        let witness = edition.witness(self.citation);
         let order = if self.is_passed_on() {
             1
         } else if witness.is_attested() {

@@ -14,6 +14,10 @@ impl Cites {
         Self { keys: sources.iter().map(|source| source.key.clone()).collect(), list: Vec::new() }
     }
 
+    pub(super) fn witnesses(&self) -> Vec<Witness> {
+        self.list.iter().map(|citation| citation.witness).collect()
+    }
+
     pub(super) fn list(self) -> Vec<Citation> {
         self.list
     }
