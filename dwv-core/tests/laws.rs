@@ -7,6 +7,7 @@ mod drawings;
 use std::collections::BTreeMap;
 
 use dwv_core::quantity::{FixtureUnits, Length, LengthUnit, Measure, PipeSize, Written};
+use dwv_core::schedule::PipeRow;
 use dwv_core::{Columns, Edition, Layout, Network, Sizing, Unattested};
 use proptest::prelude::*;
 
@@ -24,19 +25,41 @@ fn pipes(sizing: &Sizing) -> BTreeMap<String, (&'static str, PipeSize)> {
     drains.chain(vents).chain(ends).collect()
 }
 
-/// Pipes of `before` that are smaller in `after`; none when any has another name, for a name chooses the tables.
+/// The size that each drain would have if it were not for vents and for drains that empty into it.
+fn drains_by_themselves(sizing: &Sizing) -> BTreeMap<String, (&'static str, Option<PipeSize>)> {
+    let asks = |row: &PipeRow| {
+        let own = row.reasons.iter().filter(|reason| !["connected-vent", "upstream"].contains(&reason.rule));
+        own.map(|reason| reason.asks).max()
+    };
+    sizing.pipes().into_iter().map(|row| (row.id.clone(), (row.name, asks(&row)))).collect()
+}
+
+/// The size of each drain before vents have asked for more: stack vents are sized by it.
+fn drains_before_vents(sizing: &Sizing) -> BTreeMap<String, PipeSize> {
+    let ids = sizing.network.drains.id.iter().map(ToString::to_string);
+    ids.zip(sizing.columns.sizes.before_vents.iter().copied()).collect()
+}
+
+/// Why pipes were larger than they are now; none when any has another name, for a name chooses the tables.
 ///
-/// When a stack has grown, vents are left out: the stack vent table is not in order by stack. It lets a 1-1/2 in stack have a
-/// 1-1/4 in vent of 15 m, but a 1-1/4 in stack only one of 9 m (NPC 2015, Table 2.5.8.4., from memory).
-fn shrunk(before: &Sizing, after: &Sizing) -> Option<Vec<String>> {
-    let (before, after) = (pipes(before), pipes(after));
+/// When a stack has grown, sizes that come from vents are left out: the stack vent table is not in order by stack. It lets a 1-1/2 in
+/// stack have a 1-1/4 in vent of 15 m, but a 1-1/4 in stack only one of 9 m (NPC 2015, Table 2.5.8.4., from memory).
+fn shrunk(was: &Sizing, is: &Sizing) -> Option<Vec<String>> {
+    let (before, after) = (pipes(was), pipes(is));
     if before.iter().any(|(id, (name, _))| after.get(id).is_none_or(|(now, _)| now != name)) {
         return None;
     }
-    let stack_grew = before.iter().any(|(id, (name, size))| name.ends_with("stack") && after[id].1 != *size);
-    let counts = |name: &str| !stack_grew || !(name.contains("vent") || name == "terminal");
-    let smaller = |(id, (name, size)): &(&String, &(&'static str, PipeSize))| counts(name) && after[*id].1 < *size;
-    Some(before.iter().filter(smaller).map(|(id, _)| id.clone()).collect())
+    let why = |id: &String| format!("before {}after {}", was.why(id).unwrap(), is.why(id).unwrap());
+    let (own_before, own_after) = (drains_by_themselves(was), drains_by_themselves(is));
+    let mut shrunk: Vec<String> =
+        own_before.iter().filter(|(id, (_, asks))| own_after[*id].1 < *asks).map(|(id, _)| why(id)).collect();
+    let (stacks_before, stacks_after) = (drains_before_vents(was), drains_before_vents(is));
+    let is_stack = |id: &String| before[id].0.ends_with("stack");
+    let stack_grew = stacks_before.iter().any(|(id, size)| is_stack(id) && stacks_after.get(id) != Some(size));
+    if !stack_grew {
+        shrunk.extend(before.iter().filter(|(id, (_, size))| after[*id].1 < *size).map(|(id, _)| why(id)));
+    }
+    Some(shrunk)
 }
 
 proptest! {

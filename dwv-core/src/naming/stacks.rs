@@ -7,7 +7,7 @@ use super::Names;
 use crate::edition::Edition;
 use crate::loading::{Loads, refill};
 use crate::network::{DrainId, LevelRow, Network};
-use crate::quantity::Length;
+use crate::quantity::{FixtureUnits, Length};
 
 /// A stack, by its number.
 #[derive(Debug, Clone, Copy, PartialEq, Eq, PartialOrd, Ord, Hash)]
@@ -70,7 +70,7 @@ impl Names {
         refill(&mut self.stack_of, count, None);
         refill(&mut self.long_offset, count, false);
         self.stacks.clear();
-        self.scratch.follow_lines(network);
+        self.scratch.follow_lines(network, loads);
         self.scratch.group_runs(network, edition, loads);
         let scratch = &mut self.scratch;
         scratch.stack_of_group.clear();
@@ -114,7 +114,7 @@ impl Names {
 
 impl Scratch {
     /// Follows the water down every vertical run and along the level stretch at its foot.
-    fn follow_lines(&mut self, network: &Network) {
+    fn follow_lines(&mut self, network: &Network, loads: &Loads) {
         let drains = &network.drains;
         let count = drains.len();
         self.runs.clear();
@@ -123,19 +123,21 @@ impl Scratch {
         refill(&mut self.line, count, None);
         for index in 0..count {
             let drain = DrainId::new(index);
-            let mut line: Option<(bool, Length, DrainId)> = None;
+            let mut line: Option<(bool, Length, FixtureUnits, DrainId)> = None;
             for arriving in drains.arriving(drain) {
                 let Some(run) = self.run[arriving.index()] else { continue };
-                // Straight on before round a bend, then the highest line.
-                let rank = (drains.vertical[arriving.index()], self.runs[run as usize].top, arriving);
+                // Straight on before round a bend, then the highest line, then the one with the most load.
+                let load = loads.load[arriving.index()];
+                let rank = (drains.vertical[arriving.index()], self.runs[run as usize].top, load, arriving);
                 if line.is_none_or(|best| rank > best) {
                     line = Some(rank);
                 }
             }
-            self.line[index] = line.map(|(_, _, arriving)| arriving);
+            let line = line.map(|(vertical, _, _, arriving)| (vertical, arriving));
+            self.line[index] = line.map(|(_, arriving)| arriving);
             if drains.vertical[index] {
                 self.vertical(network, drain, line);
-            } else if let Some((vertical, _, arriving)) = line {
+            } else if let Some((vertical, arriving)) = line {
                 self.run[index] = self.run[arriving.index()];
                 let before = if vertical { Some(Length::ZERO) } else { self.stretch[arriving.index()] };
                 self.stretch[index] = before.zip(drains.length[index]).map(|(before, length)| before + length);
@@ -143,10 +145,10 @@ impl Scratch {
         }
     }
 
-    fn vertical(&mut self, network: &Network, drain: DrainId, line: Option<(bool, Length, DrainId)>) {
+    fn vertical(&mut self, network: &Network, drain: DrainId, line: Option<(bool, DrainId)>) {
         let drains = &network.drains;
         let index = drain.index();
-        let above = line.map(|(vertical, _, arriving)| (vertical, arriving, self.run[arriving.index()]));
+        let above = line.map(|(vertical, arriving)| (vertical, arriving, self.run[arriving.index()]));
         if let Some((true, _, Some(run))) = above {
             let run_index = run as usize;
             self.runs[run_index].last = drain;

@@ -70,7 +70,7 @@ pub struct Sizes {
     /// The size of each drain before vents have asked for more: stack vents are sized for a stack of that size. The table of
     /// stack vents is not in order by stack (a 1-1/2 in stack may have a longer 1-1/4 in vent than a 1-1/4 in stack), so that a
     /// stack which grew for the sake of its vent must not take that vent's reason away.
-    before_vents: Vec<PipeSize>,
+    pub before_vents: Vec<PipeSize>,
 }
 
 impl Sizes {
