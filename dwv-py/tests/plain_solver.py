@@ -1,7 +1,7 @@
 """A second, slow and plain solver: dictionaries and definitions, no order of passes and no columns.
 
-It names and loads a drawing and traces its air from the definitions in words, asks the edition for table values only, and
-is compared with the engine on random drawings. It knows no bathroom groups, no stated sizes and no custom fixtures.
+It names and loads a drawing and traces its air from the definitions in words, asks the edition for table values only,
+and is compared with the engine on random drawings. It knows no bathroom groups, no stated sizes and no custom fixtures.
 """
 
 from __future__ import annotations
