@@ -48,13 +48,13 @@ def draw(seed: int) -> dict[str, Any]:
             # A new place where vents meet: it leads to open air, or on to an earlier one.
             onward = f"T{collar:02}" if collar == 0 or dice.random() < 0.4 else f"V{dice.randrange(collar):02}"
             joints.append({"id": f"V{collar:02}", "level": "level 7"})
-            far = f"{dice.randint(1, 90) / 10} m"
-            vents.append({"id": f"w{collar:02}", "from": f"V{collar:02}", "to": onward, "length": far})
+            length = f"{dice.randint(1, 90) / 10} m"
+            vents.append({"id": f"w{collar:02}", "from": f"V{collar:02}", "to": onward, "length": length})
             if onward.startswith("T"):
                 terminals.append({"id": onward, "through": "roof", "above": "300 mm"})
             collars += 1
-        far = f"{dice.randint(5, 120) / 10} m"
-        vents.append({"id": f"v{joint:02}", "from": f"J{joint:02}", "to": f"V{collar:02}", "length": far})
+        length = f"{dice.randint(5, 120) / 10} m"
+        vents.append({"id": f"v{joint:02}", "from": f"J{joint:02}", "to": f"V{collar:02}", "length": length})
     return {
         "format": "dwv-layout/1",
         "name": f"random {seed}",
