@@ -6,7 +6,7 @@ use pyo3::types::PyString;
 
 use crate::refusal::{Refusal, run};
 
-/// How far a pipe falls over a length, exactly, in the unit of the length.
+/// How far a pipe falls over a length, exactly, in the unit of the length, or in inches where that is feet.
 #[pyfunction]
 #[pyo3(signature = (length, slope, /))]
 pub(crate) fn fall(py: Python<'_>, length: &Bound<'_, PyString>, slope: &Bound<'_, PyString>) -> PyResult<String> {
@@ -14,7 +14,7 @@ pub(crate) fn fall(py: Python<'_>, length: &Bound<'_, PyString>, slope: &Bound<'
     run(py, || {
         let length = Length::parse(&length).map_err(|error| Refusal::Quantity("length", error))?;
         let slope = Slope::parse(&slope).map_err(|error| Refusal::Quantity("slope", error))?;
-        Ok(slope.value.fall_over(length.value).in_unit(length.notation).to_string())
+        Ok(slope.value.fall_as_written(length).to_string())
     })
 }
 

@@ -6,7 +6,7 @@ use std::num::NonZeroU32;
 
 use super::decimal::{Fraction, divide, leading};
 use super::error::{QuantityError, shown};
-use super::length::Length;
+use super::length::{Length, LengthUnit};
 use super::written::{Quantity, Written};
 
 /// A slope: rise over run, in lowest terms.
@@ -95,6 +95,16 @@ impl Slope {
     pub fn fall_over(self, length: Length) -> Length {
         let fall = divide(i128::from(length.nanometres()) * i128::from(self.rise), i128::from(self.run.get()));
         Length::from_nanometres(fall.and_then(|fall| i64::try_from(fall).ok()).unwrap_or(i64::MAX))
+    }
+
+    /// The fall over a length as the trade would write it: in the unit of the length, but in inches where that is feet.
+    #[must_use]
+    pub fn fall_as_written(self, length: Written<Length>) -> Written<Length> {
+        let unit = match length.notation {
+            LengthUnit::Foot => LengthUnit::Inch,
+            unit => unit,
+        };
+        Written::new(self.fall_over(length.value), unit)
     }
 
     /// Reads a slope: `1:50`, `1 in 50`, `2 %`, `1/4 in per ft`, `1/4"/ft`, `20 mm/m`.
@@ -269,6 +279,15 @@ mod tests {
             let (run, fall) = (Length::parse(run).unwrap().value, Length::parse(fall).unwrap().value);
             assert_eq!(Slope::one_in(48).fall_over(run), fall);
         }
+    }
+
+    #[test]
+    fn falls_are_written_in_inches_where_lengths_are_in_feet() {
+        let fall = |length: &str| Slope::one_in(48).fall_as_written(Length::parse(length).unwrap()).to_string();
+        assert_eq!(
+            (fall("9-1/2 ft"), fall("9'-6\""), fall("4.8 m")),
+            ("2-3/8 in".into(), "0'-2 3/8\"".into(), "0.1 m".into())
+        );
     }
 
     proptest! {

@@ -6,7 +6,7 @@ from . import _dwv
 
 
 def fall(length: str, slope: str) -> str:
-    r"""How far a pipe falls over a length: exactly, in the unit of the length.
+    r"""How far a pipe falls over a length: exactly, in the unit of the length, or in inches where that is feet.
 
     Args:
         length: A length with its unit, such as `"4.5 m"` or `"3'-6 1/2\""`.
@@ -18,7 +18,7 @@ def fall(length: str, slope: str) -> str:
     >>> fall("4.5 m", "1:50")
     '0.09 m'
     >>> fall("12 ft", "1/4 in per ft")
-    '0.25 ft'
+    '3 in'
     """
     return _dwv.fall(length, slope)
 
